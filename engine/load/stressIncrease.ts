@@ -1,0 +1,98 @@
+import { atan } from '../elementary.ts';
+import type { OutOfPlane } from '../project/model.ts';
+import { pressureAt, type PressurePiece } from './fillSection.ts';
+
+/** Narrow rectangles that a piece of varying pressure and finite length is cut into. */
+const RECTANGLES = 64;
+
+/**
+ * Vertical stress increase in the elastic half-space below a pressure that varies straight from q1 at x1 to
+ * q2 at x2 and goes on without end across the section. With ξ = s − x, B = (q2 − q1)/(x2 − x1),
+ * A = q1 − B (x1 − x):
+ *
+ *     σz = (1/π) [ A (ξz/(ξ²+z²) + atan(ξ/z)) − B z³/(ξ²+z²) ]  from ξ = x1−x to ξ = x2−x
+ *
+ * Source: Boussinesq; integrates to the trapezoidal strip of Gray (1936) and Osterberg (1957);
+ * Poulos & Davis (1974).
+ *
+ * @param x position of the point, m
+ * @param z depth below the loaded surface, m, above 0
+ * @returns kPa
+ */
+export function stripStress(piece: PressurePiece, x: number, z: number): number {
+  const slope = (piece.q2 - piece.q1) / (piece.x2 - piece.x1);
+  const level = piece.q1 - slope * (piece.x1 - x);
+  return (stripTerm(piece.x2 - x, z, level, slope) - stripTerm(piece.x1 - x, z, level, slope)) / Math.PI;
+}
+
+function stripTerm(xi: number, z: number, level: number, slope: number): number {
+  const square = xi * xi + z * z;
+  return level * ((xi * z) / square + atan(xi / z)) - (slope * z * z * z) / square;
+}
+
+/**
+ * Influence below the corner of a uniformly loaded rectangle: with m = a/z, n = b/z, R = √(m²+n²+1),
+ *
+ *     I = (1/2π) [ atan(mn/R) + mn (m²+n²+2) / ((1+m²)(1+n²) R) ]
+ *
+ * Odd in a and in b, so that any rectangle is four corners. Source: Newmark (1935).
+ *
+ * @param a m; may be negative
+ * @param b m; may be negative or ±Infinity
+ * @param z depth, m, above 0
+ */
+export function cornerInfluence(a: number, b: number, z: number): number {
+  const m = a / z;
+  if (b === Infinity || b === -Infinity)
+    return ((b > 0 ? 1 : -1) * (atan(m) + m / (1 + m * m))) / (2 * Math.PI);
+  const n = b / z;
+  const [mm, nn] = [m * m, n * n];
+  const r = Math.sqrt(mm + nn + 1);
+  return (atan((m * n) / r) + (m * n * (mm + nn + 2)) / ((1 + mm) * (1 + nn) * r)) / (2 * Math.PI);
+}
+
+/** Vertical stress below a rectangle of uniform pressure from x1 to x2 and across from y1 to y2, seen from (x, 0). */
+export function rectangleInfluence(x1: number, x2: number, across: OutOfPlane, x: number, z: number): number {
+  return (
+    cornerInfluence(x2 - x, across.to, z) -
+    cornerInfluence(x1 - x, across.to, z) -
+    cornerInfluence(x2 - x, across.from, z) +
+    cornerInfluence(x1 - x, across.from, z)
+  );
+}
+
+/**
+ * Vertical stress increase below surface pressures, kPa. A finite length across the section is the
+ * superposition of narrow rectangles; at z = 0 the pressure itself.
+ *
+ * @param across extent across the section, which lies at y = 0
+ * @param wide σz = q at all depths
+ */
+export function stressIncrease(
+  pieces: readonly PressurePiece[],
+  across: OutOfPlane,
+  wide: boolean,
+  x: number,
+  z: number,
+): number {
+  if (wide || !(z > 0)) return across.from < 0 && across.to > 0 ? pressureAt(pieces, x) : 0;
+  const endless = across.from === -Infinity && across.to === Infinity;
+  let stress = 0;
+  for (const piece of pieces) {
+    stress += endless ? stripStress(piece, x, z) : finiteStress(piece, across, x, z);
+  }
+  return stress;
+}
+
+function finiteStress(piece: PressurePiece, across: OutOfPlane, x: number, z: number): number {
+  const { x1, q1, x2, q2 } = piece;
+  if (q1 === q2) return q1 * rectangleInfluence(x1, x2, across, x, z);
+  let stress = 0;
+  for (let i = 0; i < RECTANGLES; i += 1) {
+    const left = x1 + ((x2 - x1) * i) / RECTANGLES;
+    const right = x1 + ((x2 - x1) * (i + 1)) / RECTANGLES;
+    const pressure = q1 + ((q2 - q1) * (i + 0.5)) / RECTANGLES;
+    stress += pressure * rectangleInfluence(left, right, across, x, z);
+  }
+  return stress;
+}

@@ -1,0 +1,31 @@
+/** Which numbers may stand in a place. */
+export interface NumberRange {
+  readonly low: number;
+  /** Whether `low` itself may stand there. */
+  readonly lowIncluded: boolean;
+  /** May stand there itself. */
+  readonly high: number;
+}
+
+/** From low to high, both included. */
+export function fromTo(low: number, high: number): NumberRange {
+  return { low, lowIncluded: true, high };
+}
+
+/** Above low, up to high. */
+export function aboveUpTo(low: number, high: number): NumberRange {
+  return { low, lowIncluded: false, high };
+}
+
+export function isBelowRange(range: NumberRange, value: number): boolean {
+  return !(range.lowIncluded ? value >= range.low : value > range.low);
+}
+
+export function isInRange(range: NumberRange, value: number): boolean {
+  return !isBelowRange(range, value) && value <= range.high;
+}
+
+/** A range in words: 'above 0, at most 20'. */
+export function rangeInWords({ low, lowIncluded, high }: NumberRange): string {
+  return lowIncluded ? `from ${low} to ${high}` : `above ${low}, at most ${high}`;
+}
