@@ -17,6 +17,7 @@ export default defineConfig({
   // relative, so that the built files work from any sub-path
   base: './',
   publicDir: folder('public'),
+  cacheDir: folder('node_modules/.vite'),
   plugins: [svelte(), stylesOfTheDevServer],
   worker: { format: 'es' },
   build: { outDir: folder('dist'), emptyOutDir: true, sourcemap: false, target: 'es2022' },

@@ -1,109 +1,109 @@
 /*
- * exp, ln, pow, atan, sin and cos from exact operations alone, because those of `Math` differ in the last
- * digit between Node and browsers. Each is within one unit in the last place. Reductions and polynomials are
- * those of Sun's freely distributable library (fdlibm 5.3, 1993); the powers of two come from tables, which is
- * faster in JavaScript than taking numbers apart.
+ * Elementary functions that give the same bytes on every machine, as those of Math do not: written with + − × ÷,
+ * floor, abs and the bits of a number, each within 1 unit in the last place of the exact value.
  */
 
-const LN2_HIGH = 6.9314718036912382e-1;
-const LN2_LOW = 1.9082149292705877e-10;
-const SQRT_2 = 1.4142135623730951;
+const WHOLE = Float64Array.of(1);
+/** The same eight bytes as two words; which of them is the upper one depends on the machine. */
+const WORDS = new Int32Array(WHOLE.buffer);
+const UPPER = WORDS[1] === 0 ? 0 : 1;
+const SMALLEST_NORMAL = 2.2250738585072014e-308;
+const LIFT = 18014398509481984; // 2^54
 
-const bits = new Float64Array(1);
-const words = new Uint32Array(bits.buffer);
-const HIGH = new Uint8Array(new Uint32Array([1]).buffer)[0] === 1 ? 1 : 0;
+/** 2^(i − 1023) at place i, from 2^−1023 (subnormal) to 2^1023, by doubling: each is exact. */
+const POWERS_OF_TWO = new Float64Array(2047);
+POWERS_OF_TWO[1023] = 1;
+for (let i = 1024; i < 2047; i += 1) POWERS_OF_TWO[i] = POWERS_OF_TWO[i - 1] * 2;
+for (let i = 1022; i >= 0; i -= 1) POWERS_OF_TWO[i] = POWERS_OF_TWO[i + 1] * 0.5;
 
-const ZERO_POWER = 1022;
-/** 2^k for −1022 ≤ k ≤ 1023, at k + 1022. */
-const POWERS_OF_TWO = powersOfTwo();
-/** 2^−k for 0 ≤ k ≤ 31. */
-const INVERSE_POWERS = Float64Array.from({ length: 32 }, (_, k) => POWERS_OF_TWO[ZERO_POWER - k]);
+/** 2^(j/32), j = 0 … 31, each to 53 bits and followed by what is then left. */
+const ROOTS_OF_TWO = Float64Array.from([
+  1, 0, 1.0218971486541166, 5.109225028973444e-17, 1.0442737824274138, 8.551889705537965e-17,
+  1.0671404006768237, -7.899853966841582e-17, 1.0905077326652577, -3.046782079812471e-17, 1.1143867425958924,
+  1.0410278456845571e-16, 1.1387886347566916, 8.912812676025408e-17, 1.1637248587775775,
+  3.8292048369240935e-17, 1.189207115002721, 3.982015231465646e-17, 1.215247359980469, -7.712630692681488e-17,
+  1.241857812073484, 4.658027591836937e-17, 1.2690509571917332, 2.667932131342186e-18, 1.2968395546510096,
+  2.5382502794888315e-17, 1.3252366431597413, -2.8587312100388614e-17, 1.3542555469368927,
+  7.70094837980299e-17, 1.383909881963832, -6.770511658794786e-17, 1.4142135623730951, -9.667293313452913e-17,
+  1.4451808069770467, -3.0237581349939873e-17, 1.4768261459394993, -3.483994556892796e-17, 1.5091644275934228,
+  -1.016455327754295e-16, 1.5422108254079407, 7.949834809697621e-17, 1.5759808451078865,
+  -1.0136916471278304e-17, 1.6104903319492543, 2.4707192569797888e-18, 1.645755478153965,
+  -1.0125679913673774e-16, 1.681792830507429, 8.199010020581497e-17, 1.718619298122478,
+  -1.851380418263111e-17, 1.7562521603732995, 2.960140695448873e-17, 1.7947090750031072,
+  1.8227458427912087e-17, 1.8340080864093424, 3.283107224245627e-17, 1.8741676341103, -6.122763413004143e-17,
+  1.9152065613971474, -1.0619946056195963e-16, 1.9571441241754002, 8.960767791036668e-17,
+]);
 
-function powersOfTwo(): Float64Array {
-  const powers = new Float64Array(2046);
-  powers[ZERO_POWER] = 1;
-  for (let k = 1; k <= 1023; k += 1) powers[ZERO_POWER + k] = 2 * powers[ZERO_POWER + k - 1];
-  for (let k = 1; k <= 1022; k += 1) powers[ZERO_POWER - k] = 0.5 * powers[ZERO_POWER - k + 1];
-  return powers;
-}
-
-/** x · 2^k, rounded once, for −1100 ≤ k ≤ 1024. */
-function scaled(x: number, k: number): number {
-  if (k < -1022) return x * POWERS_OF_TWO[ZERO_POWER + k + 100] * POWERS_OF_TWO[ZERO_POWER - 100];
-  return k > 1023 ? x * POWERS_OF_TWO[ZERO_POWER + 1023] * 2 : x * POWERS_OF_TWO[ZERO_POWER + k];
-}
-
-/** x without the lower 32 bits of its mantissa. */
-function upperPart(x: number): number {
-  bits[0] = x;
-  words[1 - HIGH] = 0;
-  return bits[0];
-}
-
-/** Natural logarithm; −Infinity at 0, NaN below. */
-export function ln(x: number): number {
-  let k = 0;
-  let m = 0;
-  if (x >= 1 && x < 2147483648) {
-    // the exponent of a number that has a whole part of up to 31 bits
-    k = 31 - Math.clz32(x | 0);
-    m = x * INVERSE_POWERS[k];
-  } else {
-    if (!(x > 0)) return x === 0 ? -Infinity : NaN;
-    if (x === Infinity) return x;
-    const normal = x < 2.2250738585072014e-308 ? x * POWERS_OF_TWO[ZERO_POWER + 54] : x;
-    bits[0] = normal;
-    k = (words[HIGH] >>> 20) - 1023 - (normal === x ? 0 : 54);
-    words[HIGH] = (words[HIGH] & 0xfffff) | 0x3ff00000;
-    m = bits[0];
-  }
-  if (m > SQRT_2) {
-    m *= 0.5;
-    k += 1;
-  }
-  const f = m - 1;
-  const s = f / (2 + f);
-  const z = s * s;
-  const w = z * z;
-  const even = w * (3.9999999999409419e-1 + w * (2.222219843214978e-1 + w * 1.5313837699209373e-1));
-  const odd =
-    z *
-    (6.666666666666735e-1 +
-      w * (2.8571428743662391e-1 + w * (1.818357216161805e-1 + w * 1.4798198605116586e-1)));
-  const half = 0.5 * f * f;
-  return k * LN2_HIGH - (half - (s * (half + even + odd) + k * LN2_LOW) - f);
-}
-
-/** Exponential; 0 below −745.2, Infinity above 709.8. */
+/**
+ * e^x: with k the whole number nearest to 32 x/ln 2 and r = x − k ln 2/32, e^x = 2^(k/32) · e^r, the first from a
+ * table, the second a Taylor sum (|r| < 0.011). Infinity above 709.78, 0 below −745.13.
+ *
+ * Source: the table method of Tang (1989), Table-driven implementation of the exponential function, ACM TOMS 15.
+ */
 export function exp(x: number): number {
-  if (!(x < 709.7827128933841)) return x > 0 ? Infinity : NaN;
-  if (x < -745.1332191019412) return 0;
-  const k = Math.floor(1.4426950408889634 * x + 0.5);
-  const high = x - k * LN2_HIGH;
-  const low = k * LN2_LOW;
-  const r = high - low;
-  const c = r - remainder(r * r);
-  // 1 + high with what its rounding loses
-  const sum = 1 + high;
-  const y = sum + (high - (sum - 1) + ((r * c) / (2 - c) - low));
-  return k >= -1022 && k <= 1023 ? y * POWERS_OF_TWO[ZERO_POWER + k] : scaled(y, k);
+  return exponential(x, 0);
 }
 
-/** r (e^r + 1)/(e^r − 1) − 2 as a polynomial in r². */
-function remainder(square: number): number {
-  return (
-    square *
-    (1.6666666666666602e-1 +
-      square *
-        (-2.7777777777015593e-3 +
-          square * (6.6137563214379344e-5 + square * (-1.6533902205465252e-6 + square * 4.1381367970572385e-8))))
-  );
+/** e^(x + left), where left is what rounding left of x. */
+function exponential(x: number, left: number): number {
+  const k = Math.floor(46.16624130844683 * x + 0.5);
+  const r = x - k * 0.021660849392446835 + (left - k * 5.145609244655338e-14);
+  const square = r * r;
+  const fourth = 0.041666666666666664 + r * 0.008333333333333333 + square * 0.001388888888888889;
+  const gain = r + square * (0.5 + r * 0.16666666666666666 + square * fourth);
+  const place = 2 * (k & 31);
+  const root = ROOTS_OF_TWO[place];
+  const mantissa = root + (ROOTS_OF_TWO[place + 1] + root * gain);
+  if (x > -708 && x < 709) return mantissa * POWERS_OF_TWO[(k >> 5) + 1023];
+  if (x >= 709) return x > 710 ? Infinity : mantissa * POWERS_OF_TWO[(k >> 5) + 1022] * 2;
+  // a subnormal result is rounded once, in the last product
+  if (x <= -708) return x < -746 ? 0 : mantissa * POWERS_OF_TWO[(k >> 5) + 1123] * POWERS_OF_TWO[923];
+  return NaN;
 }
 
 /**
- * x to the power y for x of 0 or more, by log2 x in two pieces.
+ * Natural logarithm: with x = 2^k m, m between √½ and √2, s = (m − 1)/(m + 1), ln x = k ln 2 + 2 artanh s.
+ * ln 0 = −Infinity; NaN for what is negative.
  *
- * @throws RangeError for a negative base, or when either is not a number
+ * Source: coefficients of e_log.c, fdlibm (Sun Microsystems 1993, freely granted).
+ */
+export function ln(x: number): number {
+  let extra = 0;
+  if (!(x >= SMALLEST_NORMAL && x < Infinity)) {
+    if (!(x > 0 && x < Infinity)) return x === 0 ? -Infinity : x > 0 ? x : NaN;
+    x *= LIFT;
+    extra = -54;
+  }
+  WHOLE[0] = x;
+  const power = (WORDS[UPPER] - 0x3fe6a09e) >> 20;
+  const k = power + extra;
+  const f = x * POWERS_OF_TWO[1023 - power] - 1;
+  const s = f / (2 + f);
+  const z = s * s;
+  const w = z * z;
+  const odd = w * (0.3999999999940942 + w * (0.22222198432149784 + w * 0.15313837699209373));
+  const far = 0.2857142874366239 + w * (0.1818357216161805 + w * 0.14798198605116586);
+  const even = z * (0.6666666666666735 + w * far);
+  const half = 0.5 * f * f;
+  return k * 0.6931471803691238 - (half - (s * (half + (odd + even)) + k * 1.9082149292705877e-10) - f);
+}
+
+/** log x, base 10; outside 0 to Infinity as ln. */
+export function log10(x: number): number {
+  if (!(x > 0 && x < Infinity)) return ln(x);
+  return times(lnInTwo(x), REST[0], 0.4342944819032518, 1.098319650216765e-17);
+}
+
+/** 10^x. Infinity above 308.25, 0 below −323.6. */
+export function exp10(x: number): number {
+  if (!(x > -330 && x < 310)) return x >= 310 ? Infinity : x <= -330 ? 0 : NaN;
+  return exponential(times(x, 0, 2.302585092994046, -2.1707562233822494e-16), REST[0]);
+}
+
+/**
+ * x^y, for x of 0 or more: 0^0 = 1, 0^y = Infinity for y < 0.
+ *
+ * @throws RangeError for a negative base, whatever the exponent, and for what is not finite
  */
 export function pow(x: number, y: number): number {
   if (!(x >= 0 && x < Infinity && Math.abs(y) < Infinity)) {
@@ -111,164 +111,140 @@ export function pow(x: number, y: number): number {
   }
   if (y === 0 || x === 1) return 1;
   if (x === 0) return y > 0 ? 0 : Infinity;
-  if (y === 1) return x;
-  const [high, low] = logarithmToBase2(x);
-  const yHigh = upperPart(y);
-  const pLow = (y - yHigh) * high + y * low;
-  const pHigh = yHigh * high;
-  const z = pLow + pHigh;
-  if (z >= 1024) return Infinity;
-  if (z <= -1076) return 0;
-  return powerOf2(pHigh, pLow);
+  const logarithm = lnInTwo(x);
+  const size = logarithm * y;
+  if (!(size > -750 && size < 710)) return size > 0 ? Infinity : 0;
+  return exponential(times(logarithm, REST[0], y, 0), REST[0]);
 }
 
-/** 2^(high + low). */
-function powerOf2(high: number, low: number): number {
-  const n = Math.floor(high + low + 0.5);
-  const rest = high - n;
-  const t = upperPart(rest + low);
-  const u = t * 6.931471824645996e-1;
-  const v = (low - (t - rest)) * 6.931471805599453e-1 + t * -1.904654299957768e-9;
-  const z = u + v;
-  const w = v - (z - u);
-  const c = z - remainder(z * z);
-  const sum = 1 + z;
-  return scaled(sum + (z - (sum - 1) - ((z * c) / (c - 2) - (w + z * w))), n);
+/** In its only place: what rounding left of the last result of the next four functions. */
+const REST = new Float64Array(1);
+
+/** a + b in two parts (Knuth 1969, The Art of Computer Programming 2, section 4.2.2). */
+function sum(a: number, b: number): number {
+  const total = a + b;
+  const part = total - a;
+  REST[0] = a - (total - part) + (b - part);
+  return total;
 }
 
-/** log2 x in two pieces, together good to about 70 bits; the first has 21 bits in its mantissa. */
-function logarithmToBase2(x: number): readonly [number, number] {
-  const normal = x < 2.2250738585072014e-308 ? x * POWERS_OF_TWO[ZERO_POWER + 54] : x;
-  bits[0] = normal;
-  let n = (words[HIGH] >>> 20) - 1023 - (normal === x ? 0 : 54);
-  const mantissa = words[HIGH] & 0xfffff;
-  let upper = mantissa | 0x3ff00000;
-  const isMiddle = mantissa > 0x3988e && mantissa < 0xbb67a;
-  if (mantissa >= 0xbb67a) {
-    n += 1;
-    upper -= 0x100000;
-  }
-  words[HIGH] = upper;
-  const a = bits[0];
-  const base = isMiddle ? 1.5 : 1;
-  const u = a - base;
-  const v = 1 / (a + base);
-  const s = u * v;
-  const sHigh = upperPart(s);
-  bits[0] = 0;
-  words[HIGH] = ((upper >> 1) | 0x20000000) + 0x80000 + (isMiddle ? 0x40000 : 0);
-  const tHigh = bits[0];
-  const tLow = a - (tHigh - base);
-  const sLow = v * (u - sHigh * tHigh - sHigh * tLow);
-  const s2 = s * s;
-  const series =
-    s2 *
-      s2 *
-      (5.999999999999946e-1 +
-        s2 *
-          (4.285714285785502e-1 +
-            s2 *
-              (3.3333332981837743e-1 +
-                s2 * (2.72728123808534e-1 + s2 * (2.3066074577556175e-1 + s2 * 2.0697501780033842e-1))))) +
-    sLow * (sHigh + s);
-  const square = sHigh * sHigh;
-  const three = upperPart(3 + square + series);
-  const threeLow = series - (three - 3 - square);
-  const product = sHigh * three;
-  const productLow = sLow * three + threeLow * s;
-  const pHigh = upperPart(product + productLow);
-  const pLow = productLow - (pHigh - product);
-  const zHigh = 9.617967009544373e-1 * pHigh;
-  const zLow = -7.028461650952758e-9 * pHigh + pLow * 9.617966939259756e-1 + (isMiddle ? 1.350039202129749e-8 : 0);
-  const baseHigh = isMiddle ? 5.849624872207642e-1 : 0;
-  const high = upperPart(zHigh + zLow + baseHigh + n);
-  return [high, zLow - (high - n - baseHigh - zHigh)];
+/** (a + aRest) + (b + bRest) in two parts, where |a| ≥ |b| or a = 0. */
+function plus(a: number, aRest: number, b: number, bRest: number): number {
+  const total = a + b;
+  const left = b - (total - a) + (aRest + bRest);
+  const rounded = total + left;
+  REST[0] = left - (rounded - total);
+  return rounded;
 }
 
-/** Arc tangent. */
+/** (a + aRest)(b + bRest) in two parts (Dekker 1971, A floating-point technique, Numerische Mathematik 18). */
+function times(a: number, aRest: number, b: number, bRest: number): number {
+  const product = a * b;
+  const aHead = 134217729 * a - (134217729 * a - a);
+  const bHead = 134217729 * b - (134217729 * b - b);
+  const aTail = a - aHead;
+  const bTail = b - bHead;
+  const error = aTail * bTail - (product - aHead * bHead - aTail * bHead - aHead * bTail);
+  return plus(product, error, a * bRest + aRest * b, 0);
+}
+
+/** ln x in two parts, good to about 2^−65, as 2 (s + s³/3 + s⁵/5 + …); x above 0 and finite. */
+function lnInTwo(x: number): number {
+  const normal = x < SMALLEST_NORMAL ? x * LIFT : x;
+  WHOLE[0] = normal;
+  const power = (WORDS[UPPER] - 0x3fe6a09e) >> 20;
+  const k = power - (normal === x ? 0 : 54);
+  const m = normal * POWERS_OF_TWO[1023 - power];
+  const below = m + 1;
+  const s = (m - 1) / below;
+  const back = times(s, 0, below, m - (below - 1));
+  const sRest = (m - 1 - back - REST[0]) / below;
+  const z = times(s, sRest, s, sRest);
+  const zRest = REST[0];
+  let far = 0; // z/5 + z²/7 + …
+  for (let i = 0; i < ODD_INVERSES.length; i += 1) far = (far + ODD_INVERSES[i]) * z;
+  let series = plus(0.3333333333333333, 1.850371707708594e-17, far, 0);
+  series = times(series, REST[0], z, zRest);
+  series = times(series, REST[0], 2 * s, 2 * sRest);
+  series = plus(2 * s, 2 * sRest, series, REST[0]);
+  // ln 2 in two parts, of which the first is exact times k
+  return plus(k * 0.6931471805598903, k * 5.497923018708371e-14, series, REST[0]);
+}
+
+/** 1/25, 1/23 … 1/5 */
+const ODD_INVERSES = Float64Array.from({ length: 11 }, (_, i) => 1 / (25 - 2 * i));
+
+/**
+ * Arc tangent, radians: x taken to the nearest of 0, ½, 1, 3/2 and ∞ by the addition formula, then a polynomial.
+ *
+ * Source: coefficients of s_atan.c, fdlibm (Sun Microsystems 1993, freely granted).
+ */
 export function atan(x: number): number {
   const size = Math.abs(x);
-  if (!(size < 7.378697629483821e19)) return x > 0 ? 1.5707963267948966 : x < 0 ? -1.5707963267948966 : NaN;
-  if (size < 0.4375) return x - x * arcSeries(x);
-  const sign = x < 0 ? -1 : 1;
-  if (size < 0.6875) return sign * arcFrom((2 * size - 1) / (2 + size), 4.636476090008061e-1, 2.2698777452961687e-17);
-  if (size < 1.1875) return sign * arcFrom((size - 1) / (size + 1), 7.853981633974483e-1, 3.061616997868383e-17);
-  if (size < 2.4375) {
-    return sign * arcFrom((size - 1.5) / (1 + 1.5 * size), 9.827937232473291e-1, 1.3903311031230998e-17);
-  }
-  return sign * arcFrom(-1 / size, 1.5707963267948966, 6.123233995736766e-17);
+  if (size < 0.4375) return size < 1e-9 ? x : x - x * arcSeries(x);
+  return x < 0 ? -arcBeyond(size) : arcBeyond(size);
 }
 
-function arcFrom(x: number, high: number, low: number): number {
-  return high - (x * arcSeries(x) - low - x);
+function arcBeyond(x: number): number {
+  if (x < 0.6875) return arcFrom((2 * x - 1) / (2 + x), 0.4636476090008061, 2.2698777452961687e-17);
+  if (x < 1.1875) return arcFrom((x - 1) / (x + 1), 0.7853981633974483, 3.061616997868383e-17);
+  if (x < 2.4375) return arcFrom((x - 1.5) / (1 + 1.5 * x), 0.982793723247329, 1.3903311031230998e-17);
+  return arcFrom(-1 / x, 1.5707963267948966, 6.123233995736766e-17);
 }
 
-/** 1 − atan(x)/x for |x| below 7/16. */
-function arcSeries(x: number): number {
-  const z = x * x;
+function arcFrom(t: number, near: number, nearRest: number): number {
+  return near - (t * arcSeries(t) - nearRest - t);
+}
+
+/** 1 − atan(t)/t for |t| below 7/16. */
+function arcSeries(t: number): number {
+  const z = t * t;
   const w = z * z;
-  const odd =
-    z *
-    (3.333333333333293e-1 +
-      w *
-        (1.4285714272503466e-1 +
-          w *
-            (9.090887133436507e-2 +
-              w * (6.661073137387531e-2 + w * (4.976877994615932e-2 + w * 1.6285820115365782e-2)))));
-  const even =
-    w *
-    (-1.9999999999876483e-1 +
-      w *
-        (-1.1111110405462356e-1 +
-          w * (-7.69187620504483e-2 + w * (-5.833570133790573e-2 + w * -3.6531572744216916e-2))));
-  return odd + even;
+  const oddFar =
+    0.09090887133436507 + w * (0.06661073137387531 + w * (0.049768779946159324 + w * 0.016285820115365782));
+  const odd = z * (0.3333333333333293 + w * (0.14285714272503466 + w * oddFar));
+  const evenFar = -0.0769187620504483 + w * (-0.058335701337905735 + w * -0.036531572744216916);
+  return odd + w * (-0.19999999999876483 + w * (-0.11111110405462356 + w * evenFar));
 }
 
-/** Sine, |x| up to 100,000. */
+/** Sine of an angle in radians. Throws RangeError beyond −100,000 to 100,000. */
 export function sin(x: number): number {
-  return circular(x, 0);
+  return wave('sin', x, 0);
 }
 
-/** Cosine, |x| up to 100,000. */
+/** Cosine of an angle in radians. Throws RangeError beyond −100,000 to 100,000. */
 export function cos(x: number): number {
-  return circular(x, 1);
+  return wave('cos', x, 1);
 }
 
-/** sin(x + quarter · π/2), π/2 taken off in three pieces. */
-function circular(x: number, quarter: number): number {
-  if (!(Math.abs(x) <= 1e5)) throw new RangeError(`sin, cos: x must be from −100,000 to 100,000, got ${x}`);
-  const n = Math.floor(x * 6.36619772367581343076e-1 + 0.5);
-  const t = x - n * 1.5707963267341256;
-  const w = n * 6.077100506303966e-11;
-  const r = t - w;
-  const correction = n * 2.0222662487959506e-21 - (t - r - w);
-  const high = r - correction;
-  const low = r - high - correction;
-  const turn = (n + quarter) & 3;
-  const value = (turn & 1) === 0 ? sineNear(high, low) : cosineNear(high, low);
-  return turn < 2 ? value : -value;
+/** sin(x + quarters · π/2); π/2 in four parts, of which three are exact times n (Cody & Waite 1980). */
+function wave(name: string, x: number, quarters: number): number {
+  if (!(Math.abs(x) <= 1e5)) throw new RangeError(`${name}: x must be from -100,000 to 100,000, got ${x}`);
+  const n = Math.floor(x * 0.6366197723675814 + 0.5);
+  const first = sum(x - n * 1.5707963267341256, n * -6.077100506303966e-11);
+  const firstRest = REST[0];
+  const second = sum(first, n * -2.0222662487111665e-21);
+  const angle = sum(second, firstRest + REST[0] - n * 8.4784276603689e-32);
+  const value = (n + quarters) & 1 ? cosineNearZero(angle, REST[0]) : sineNearZero(angle, REST[0]);
+  return (n + quarters) & 2 ? -value : value;
 }
 
-function sineNear(x: number, low: number): number {
-  const z = x * x;
-  const v = z * x;
-  const r =
-    8.33333333332249e-3 +
-    z * (-1.984126982985795e-4 + z * (2.7557313707070068e-6 + z * (-2.5050760253406863e-8 + z * 1.58969099521155e-10)));
-  return x - (z * (0.5 * low - v * r) - low - v * -1.6666666666666632e-1);
+/** sin(t + left), |t| ≤ π/4; coefficients of k_sin.c, fdlibm. */
+function sineNearZero(t: number, left: number): number {
+  const z = t * t;
+  const far = 2.7557313707070068e-6 + z * (-2.5050760253406863e-8 + z * 1.58969099521155e-10);
+  const series = 0.00833333333332249 + z * (-0.00019841269829857949 + z * far);
+  const cube = z * t;
+  return t - (z * (0.5 * left - cube * series) - left - cube * -0.16666666666666632);
 }
 
-function cosineNear(x: number, low: number): number {
-  const z = x * x;
-  const r =
-    z *
-    (4.1666666666666602e-2 +
-      z *
-        (-1.388888888887411e-3 +
-          z *
-            (2.480158728947673e-5 +
-              z * (-2.7557314351390663e-7 + z * (2.087572321298175e-9 + z * -1.1359647557788195e-11)))));
+/** cos(t + left), |t| ≤ π/4; coefficients of k_cos.c, fdlibm. */
+function cosineNearZero(t: number, left: number): number {
+  const z = t * t;
+  const far = -2.7557314351390663e-7 + z * (2.087572321298175e-9 + z * -1.1359647557788195e-11);
+  const series =
+    z * (0.0416666666666666 + z * (-0.001388888888887411 + z * (2.480158728947673e-5 + z * far)));
   const half = 0.5 * z;
-  const w = 1 - half;
-  return w + (1 - w - half + (z * r - x * low));
+  const most = 1 - half;
+  return most + (1 - most - half + (z * series - t * left));
 }

@@ -1,13 +1,11 @@
 import type { Model } from './project/model.ts';
+import { REALISATIONS_IN_REPLICATE } from './project/replicateSize.ts';
 import { centralGround } from './sampling/centralGround.ts';
 import { drawGround } from './sampling/drawGround.ts';
 import { realise, WORKING_RESOLUTION } from './settlement/realise.ts';
 import type { Realisations } from './settlement/realisations.ts';
 import { likelyToGovern, type LikelyToGovern } from './settlement/likelyToGovern.ts';
 import type { NumericalError } from './summary/summary.ts';
-
-/** Realisations in a replicate: the strata of its Latin hypercube. */
-export const REALISATIONS_IN_REPLICATE = 100;
 
 /** How much finer cells and steps are cut to measure the numerical error of the central realisation. */
 const FINER = 8;

@@ -2,9 +2,6 @@ import { atan } from '../elementary.ts';
 import type { OutOfPlane } from '../project/model.ts';
 import { pressureAt, type PressurePiece } from './fillSection.ts';
 
-/** Narrow rectangles that a piece of varying pressure and finite length is cut into. */
-const RECTANGLES = 64;
-
 /**
  * Vertical stress increase in the elastic half-space below a pressure that varies straight from q1 at x1 to
  * q2 at x2 and goes on without end across the section. With ξ = s − x, B = (q2 − q1)/(x2 − x1),
@@ -51,7 +48,7 @@ export function cornerInfluence(a: number, b: number, z: number): number {
   return (atan((m * n) / r) + (m * n * (mm + nn + 2)) / ((1 + mm) * (1 + nn) * r)) / (2 * Math.PI);
 }
 
-/** Vertical stress below a rectangle of uniform pressure from x1 to x2 and across from y1 to y2, seen from (x, 0). */
+/** Vertical stress below a rectangle of 1 kPa from x1 to x2 and across it, seen from (x, 0). */
 export function rectangleInfluence(x1: number, x2: number, across: OutOfPlane, x: number, z: number): number {
   return (
     cornerInfluence(x2 - x, across.to, z) -
@@ -62,8 +59,25 @@ export function rectangleInfluence(x1: number, x2: number, across: OutOfPlane, x
 }
 
 /**
+ * Influence below the corner of a rectangle whose pressure grows from 0 at the corner by 1 kPa/m along a:
+ *
+ *     M = (b z/2π) [ 1/√(b²+z²) − z²/((a²+z²) √(a²+b²+z²)) ]
+ *
+ * Even in a, odd in b. By integrating Boussinesq's point load over the rectangle, which is the limit of ever
+ * narrower rectangles by the corner formula.
+ *
+ * @returns m
+ */
+export function cornerInfluenceOfSlope(a: number, b: number, z: number): number {
+  const near = a * a + z * z;
+  if (b === Infinity || b === -Infinity) return ((b > 0 ? 1 : -1) * z * (1 - (z * z) / near)) / (2 * Math.PI);
+  const inner = 1 / Math.sqrt(b * b + z * z) - (z * z) / (near * Math.sqrt(near + b * b));
+  return (b * z * inner) / (2 * Math.PI);
+}
+
+/**
  * Vertical stress increase below surface pressures, kPa. A finite length across the section is the
- * superposition of narrow rectangles; at z = 0 the pressure itself.
+ * superposition of narrow rectangles, carried to its limit; at z = 0 the pressure itself.
  *
  * @param across extent across the section, which lies at y = 0
  * @param wide σz = q at all depths
@@ -84,15 +98,19 @@ export function stressIncrease(
   return stress;
 }
 
-function finiteStress(piece: PressurePiece, across: OutOfPlane, x: number, z: number): number {
-  const { x1, q1, x2, q2 } = piece;
-  if (q1 === q2) return q1 * rectangleInfluence(x1, x2, across, x, z);
-  let stress = 0;
-  for (let i = 0; i < RECTANGLES; i += 1) {
-    const left = x1 + ((x2 - x1) * i) / RECTANGLES;
-    const right = x1 + ((x2 - x1) * (i + 1)) / RECTANGLES;
-    const pressure = q1 + ((q2 - q1) * (i + 0.5)) / RECTANGLES;
-    stress += pressure * rectangleInfluence(left, right, across, x, z);
-  }
-  return stress;
+/** A piece of finite length across the section: its level and its slope at the point, each by four corners. */
+function finiteStress({ x1, q1, x2, q2 }: PressurePiece, across: OutOfPlane, x: number, z: number): number {
+  const slope = (q2 - q1) / (x2 - x1);
+  const level = q1 - slope * (x1 - x);
+  const even = level * rectangleInfluence(x1, x2, across, x, z);
+  if (slope === 0) return even;
+  const [right, left] = [x2 - x, x1 - x];
+  return (
+    even +
+    slope *
+      (cornerInfluenceOfSlope(right, across.to, z) -
+        cornerInfluenceOfSlope(left, across.to, z) -
+        cornerInfluenceOfSlope(right, across.from, z) +
+        cornerInfluenceOfSlope(left, across.from, z))
+  );
 }

@@ -1,5 +1,4 @@
-import { exp, ln } from '../elementary.ts';
-import { inverseIncompleteBeta, logGamma, regularisedIncompleteBeta } from './incompleteBeta.ts';
+import { betaWeight, inverseIncompleteBeta, regularisedIncompleteBeta } from './incompleteBeta.ts';
 
 /** Beta distribution between two limits. */
 export interface Beta {
@@ -47,7 +46,8 @@ export function makeBetaFromMoments(input: {
 }
 
 export function betaQuantile({ low, high, alpha, beta }: Beta, p: number): number {
-  return low + (high - low) * inverseIncompleteBeta(p, alpha, beta);
+  const share = inverseIncompleteBeta(p, alpha, beta);
+  return share < 0.5 ? low + (high - low) * share : high - (high - low) * (1 - share);
 }
 
 export function betaCumulative({ low, high, alpha, beta }: Beta, x: number): number {
@@ -56,14 +56,9 @@ export function betaCumulative({ low, high, alpha, beta }: Beta, x: number): num
 
 export function betaDensity({ low, high, alpha, beta }: Beta, x: number): number {
   const share = (x - low) / (high - low);
-  if (!(share > 0 && share < 1)) return 0;
-  const logDensity =
-    (alpha - 1) * ln(share) +
-    (beta - 1) * ln(1 - share) +
-    logGamma(alpha + beta) -
-    logGamma(alpha) -
-    logGamma(beta);
-  return exp(logDensity) / (high - low);
+  const left = (high - x) / (high - low);
+  if (!(share > 0 && left > 0)) return 0;
+  return betaWeight(share, left, alpha, beta) / (share * left * (high - low));
 }
 
 export function betaMoments({ low, high, alpha, beta }: Beta): {

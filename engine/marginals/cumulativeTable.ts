@@ -25,10 +25,12 @@ export function makeTable(input: {
 
 export function tableQuantile({ values, cumulative }: CumulativeTable, p: number): number {
   let right = 1;
-  while (right < cumulative.length - 1 && cumulative[right] < p) right += 1;
+  // where the curve starts level, nothing lies below the end of that stretch
+  while (cumulative[right] < p || cumulative[right] === 0) right += 1;
   const rise = cumulative[right] - cumulative[right - 1];
-  const share = rise > 0 ? (p - cumulative[right - 1]) / rise : 0;
-  return values[right - 1] + Math.max(0, Math.min(1, share)) * (values[right] - values[right - 1]);
+  const share = (p - cumulative[right - 1]) / rise;
+  const width = values[right] - values[right - 1];
+  return share < 0.5 ? values[right - 1] + share * width : values[right] - (1 - share) * width;
 }
 
 export function tableCumulative({ values, cumulative }: CumulativeTable, x: number): number {
@@ -47,18 +49,21 @@ export function tableDensity({ values, cumulative }: CumulativeTable, x: number)
   return (cumulative[right] - cumulative[right - 1]) / (values[right] - values[right - 1]);
 }
 
-/** Each stretch is uniform: its mean is its middle, its mean square (a² + ab + b²)/3. */
+/** Each stretch is uniform: variance of its width w²/12, and its middle's distance from the mean. */
 export function tableMoments({ values, cumulative }: CumulativeTable): {
   readonly mean: number;
   readonly deviation: number;
 } {
-  let mean = 0;
-  let square = 0;
-  for (let i = 1; i < values.length; i += 1) {
-    const share = cumulative[i] - cumulative[i - 1];
-    const [a, b] = [values[i - 1], values[i]];
-    mean += (share * (a + b)) / 2;
-    square += (share * (a * a + a * b + b * b)) / 3;
-  }
-  return { mean, deviation: Math.sqrt(Math.max(0, square - mean * mean)) };
+  const stretches = values.slice(1).map((value, i) => ({
+    share: cumulative[i + 1] - cumulative[i],
+    middle: values[i] + 0.5 * (value - values[i]),
+    width: value - values[i],
+  }));
+  const mean = stretches.reduce((sum, { share, middle }) => sum + share * middle, 0);
+  const variance = stretches.reduce(
+    (sum, { share, middle, width }) =>
+      sum + share * ((width * width) / 12 + (middle - mean) * (middle - mean)),
+    0,
+  );
+  return { mean, deviation: Math.sqrt(variance) };
 }

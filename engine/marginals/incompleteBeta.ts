@@ -1,83 +1,137 @@
 import { exp, ln } from '../elementary.ts';
+import { stirlingRest } from './logGamma.ts';
 
-const LANCZOS = [
-  0.9999999999998099, 676.5203681218851, -1259.1392167224028, 771.3234287776531, -176.6150291621406,
-  12.507343278686905, -0.13857109526572012, 9.984369578019572e-6, 1.5056327351493116e-7,
-];
-
-/** ln Γ(x) for x > 0, Lanczos (1964) with g = 7 and nine terms; about 1e-15 relative. */
-export function logGamma(x: number): number {
-  if (!(x > 0)) throw new RangeError(`logGamma: x must be above 0, got ${x}`);
-  if (x < 0.5) return logGamma(x + 1) - ln(x);
-  const shifted = x - 1;
-  let sum = LANCZOS[0];
-  for (let k = 1; k < LANCZOS.length; k += 1) sum += LANCZOS[k] / (shifted + k);
-  const t = shifted + 7.5;
-  return 0.9189385332046728 + (shifted + 0.5) * ln(t) - t + ln(sum);
-}
-
-const MOST_TERMS = 10_000;
+const MOST_TERMS = 100_000;
+const MOST_STEPS = 200;
 const SMALLEST = 1e-300;
 
 /**
- * Regularised incomplete beta function I_x(a, b), by its continued fraction (modified Lentz), on the side of
- * the mean where that closes fast.
+ * Regularised incomplete beta function I_x(a, b), by its continued fraction on the side where that closes fast.
  *
  * @param x from 0 to 1
  * @param a shape, above 0
  * @param b shape, above 0
  */
 export function regularisedIncompleteBeta(x: number, a: number, b: number): number {
-  if (!(a > 0 && b > 0))
-    throw new RangeError(`regularisedIncompleteBeta: shapes must be above 0, got ${a}, ${b}`);
+  refuseShapes('regularisedIncompleteBeta', a, b);
   if (!(x >= 0 && x <= 1)) throw new RangeError(`regularisedIncompleteBeta: x must be from 0 to 1, got ${x}`);
   if (x === 0 || x === 1) return x;
-  if (x > (a + 1) / (a + b + 2)) return 1 - regularisedIncompleteBeta(1 - x, b, a);
-  const front = exp(a * ln(x) + b * ln(1 - x) + logGamma(a + b) - logGamma(a) - logGamma(b)) / a;
-  return front * continuedFraction(x, a, b);
-}
-
-function continuedFraction(x: number, a: number, b: number): number {
-  const away = (value: number) => (Math.abs(value) < SMALLEST ? SMALLEST : value);
-  let c = 1;
-  let d = 1 / away(1 - ((a + b) * x) / (a + 1));
-  let fraction = d;
-  for (let m = 1; m < MOST_TERMS; m += 1) {
-    const even = (m * (b - m) * x) / ((a + 2 * m - 1) * (a + 2 * m));
-    d = 1 / away(1 + even * d);
-    c = away(1 + even / c);
-    fraction *= d * c;
-    const odd = (-(a + m) * (a + b + m) * x) / ((a + 2 * m) * (a + 2 * m + 1));
-    d = 1 / away(1 + odd * d);
-    c = away(1 + odd / c);
-    const factor = d * c;
-    fraction *= factor;
-    if (Math.abs(factor - 1) < 1e-16) break;
-  }
-  return fraction;
+  return x <= turningPoint(a, b) ? lowerShare(x, 1 - x, a, b) : 1 - lowerShare(1 - x, x, b, a);
 }
 
 /**
- * x with I_x(a, b) = p: Newton's method kept between bounds that close in.
+ * x with I_x(a, b) = p, by Newton's method for ln I over ln x, from the nearer end. It is the lower limit of
+ * Clopper & Pearson for k of n at (k, n − k + 1).
  *
  * @param p from 0 to 1
+ * @param a shape, above 0
+ * @param b shape, above 0
  */
 export function inverseIncompleteBeta(p: number, a: number, b: number): number {
+  return inverseWithComplement(p, a, b)[0];
+}
+
+/** x with I_x(a, b) = p, and 1 − x without losing its digits where x is close to 1. */
+export function inverseWithComplement(p: number, a: number, b: number): readonly [number, number] {
+  refuseShapes('inverseIncompleteBeta', a, b);
   if (!(p >= 0 && p <= 1)) throw new RangeError(`inverseIncompleteBeta: p must be from 0 to 1, got ${p}`);
-  if (p === 0 || p === 1) return p;
-  const logScale = logGamma(a + b) - logGamma(a) - logGamma(b);
-  let [low, high] = [0, 1];
-  let x = a / (a + b);
-  for (let iteration = 0; iteration < 200; iteration += 1) {
-    const miss = regularisedIncompleteBeta(x, a, b) - p;
-    if (miss === 0) return x;
-    if (miss > 0) high = x;
+  if (p === 0 || p === 1) return [p, 1 - p];
+  const turn = turningPoint(a, b);
+  if (p <= lowerShare(turn, 1 - turn, a, b)) {
+    const x = solvedFromBelow(p, a, b);
+    return [x, 1 - x];
+  }
+  const y = solvedFromBelow(1 - p, b, a);
+  return [1 - y, y];
+}
+
+/**
+ * x^a (1 − x)^b / B(a, b), by the deviance of the binomial distribution, which stays good for large shapes.
+ *
+ * Source: Loader (2000), Fast and accurate computation of binomial probabilities.
+ *
+ * @param x between 0 and 1
+ * @param y 1 − x
+ */
+export function betaWeight(x: number, y: number, a: number, b: number): number {
+  const sum = a + b;
+  const rest = stirlingRest(sum) - stirlingRest(a) - stirlingRest(b);
+  return exp(rest - deviance(a, sum * x) - deviance(b, sum * y)) * Math.sqrt(((a / sum) * b) / (2 * Math.PI));
+}
+
+/** k ln(k/m) + m − k, by a series where k and m are close. */
+function deviance(k: number, m: number): number {
+  const apart = k - m;
+  if (!(Math.abs(apart) < 0.1 * (k + m))) return k * (ln(k) - ln(m)) - apart;
+  const v = apart / (k + m);
+  const square = v * v;
+  let term = 2 * k * v;
+  let total = apart * v;
+  for (let odd = 3; ; odd += 2) {
+    term *= square;
+    const next = total + term / odd;
+    if (next === total) return total;
+    total = next;
+  }
+}
+
+function refuseShapes(name: string, a: number, b: number): void {
+  if (!(a > 0 && b > 0 && a + b < Infinity)) {
+    throw new RangeError(`${name}: a and b must be above 0, got ${a} and ${b}`);
+  }
+}
+
+/** Up to here the continued fraction closes within about √max(a, b) terms; past it that of (1 − x, b, a) does. */
+function turningPoint(a: number, b: number): number {
+  return (a + 1) / (a + b + 2);
+}
+
+/** I_x(a, b) for x up to the turning point; y is 1 − x. */
+function lowerShare(x: number, y: number, a: number, b: number): number {
+  return (betaWeight(x, y, a, b) / a) * continuedFraction(x, a, b);
+}
+
+/** By Lentz's method as in Press et al. (1992), Numerical Recipes, section 6.4. */
+function continuedFraction(x: number, a: number, b: number): number {
+  let c = 1;
+  let d = 1 / awayFromZero(1 - ((a + b) * x) / (a + 1));
+  let fraction = d;
+  for (let m = 1; m < MOST_TERMS; m += 1) {
+    const even = (m * (b - m) * x) / ((a + 2 * m - 1) * (a + 2 * m));
+    d = 1 / awayFromZero(1 + even * d);
+    c = awayFromZero(1 + even / c);
+    fraction *= d * c;
+    const odd = (-(a + m) * (a + b + m) * x) / ((a + 2 * m) * (a + 2 * m + 1));
+    d = 1 / awayFromZero(1 + odd * d);
+    c = awayFromZero(1 + odd / c);
+    const factor = d * c;
+    fraction *= factor;
+    if (Math.abs(factor - 1) < 3e-16) return fraction;
+  }
+  throw new RangeError(`regularisedIncompleteBeta: the fraction does not close for x ${x}, a ${a}, b ${b}`);
+}
+
+function awayFromZero(value: number): number {
+  return Math.abs(value) < SMALLEST ? SMALLEST : value;
+}
+
+/** x up to the turning point with I_x(a, b) = p; d ln I/d ln x = a/((1 − x) · fraction). */
+function solvedFromBelow(p: number, a: number, b: number): number {
+  let low = 0;
+  let high = turningPoint(a, b);
+  // I grows about as x^a
+  const atTurn = lowerShare(high, 1 - high, a, b);
+  let x = high * exp(Math.max(-700, (ln(p) - ln(atTurn)) / a));
+  for (let step = 0; step < MOST_STEPS; step += 1) {
+    const fraction = continuedFraction(x, a, b);
+    const share = (betaWeight(x, 1 - x, a, b) / a) * fraction;
+    const change = ((share > 0 ? ln(p / share) : 700) * (1 - x) * fraction) / a;
+    // the next step's error is about a times the square of this one
+    if (Math.abs(change) < 1e-10) return x + x * change;
+    if (share > p) high = x;
     else low = x;
-    const slope = exp((a - 1) * ln(x) + (b - 1) * ln(1 - x) + logScale);
-    const newton = x - miss / slope;
-    const next = newton > low && newton < high ? newton : low > 0 ? 0.5 * (low + high) : 0.5 * high;
-    if (Math.abs(next - x) <= 1e-15 * x) return next;
-    x = next;
+    const newton = x * exp(Math.max(-50, Math.min(50, change)));
+    x = newton > low && newton < high ? newton : low > 0 ? Math.sqrt(low) * Math.sqrt(high) : 0.5 * high;
   }
   return x;
 }

@@ -1,4 +1,5 @@
 import { exp, ln } from '../elementary.ts';
+import { lnOnePlus } from './logGamma.ts';
 import { normalCumulative, normalDensity, normalQuantile } from './standardNormal.ts';
 
 /** Lognormal distribution: ln X is normal with mean `logMean` and deviation `logDeviation`. */
@@ -17,8 +18,8 @@ export function makeLognormal(input: {
   if (!(mean > 0 && Number.isFinite(mean))) return 'the mean must be above 0';
   if (!(deviation > 0 && Number.isFinite(deviation))) return 'the deviation must be above 0';
   const variation = deviation / mean;
-  const square = ln(1 + variation * variation);
-  if (!(square > 0)) return 'the deviation is too small beside the mean to make a distribution';
+  const square = lnOnePlus(variation * variation);
+  if (!(square > 0 && square < Infinity)) return 'the deviation is too small or too large beside the mean';
   return { kind: 'lognormal', logMean: ln(mean) - 0.5 * square, logDeviation: Math.sqrt(square) };
 }
 
@@ -30,8 +31,8 @@ export function makeLognormalFromMedian(input: {
   const { median, cov } = input;
   if (!(median > 0 && Number.isFinite(median))) return 'the median must be above 0';
   if (!(cov > 0 && Number.isFinite(cov))) return 'the coefficient of variation must be above 0';
-  const square = ln(1 + cov * cov);
-  if (!(square > 0)) return 'the coefficient of variation is too small to make a distribution';
+  const square = lnOnePlus(cov * cov);
+  if (!(square > 0 && square < Infinity)) return 'the coefficient of variation is too small or too large';
   return { kind: 'lognormal', logMean: ln(median), logDeviation: Math.sqrt(square) };
 }
 
@@ -52,5 +53,11 @@ export function lognormalMoments({ logMean, logDeviation }: Lognormal): {
   readonly deviation: number;
 } {
   const mean = exp(logMean + 0.5 * logDeviation * logDeviation);
-  return { mean, deviation: mean * Math.sqrt(exp(logDeviation * logDeviation) - 1) };
+  return { mean, deviation: mean * Math.sqrt(expLessOne(logDeviation * logDeviation)) };
+}
+
+/** e^x − 1 without losing a small x (Kahan's correction of the rounded e^x). */
+function expLessOne(x: number): number {
+  const power = exp(x);
+  return power === 1 ? x : power < Infinity ? ((power - 1) * x) / ln(power) : power;
 }

@@ -29,7 +29,7 @@ import {
   triangularQuantile,
   type Triangular,
 } from './triangular.ts';
-import type { Uniform } from './uniform.ts';
+import { uniformQuantile, type Uniform } from './uniform.ts';
 
 /** A distribution as plain data, valid by how it was made. */
 export type Marginal = Fixed | Normal | Lognormal | Uniform | Triangular | Pert | Beta | CumulativeTable;
@@ -39,7 +39,7 @@ export function isUncertain(marginal: Marginal): boolean {
 }
 
 /**
- * F⁻¹(p).
+ * F⁻¹(p), the least x with a probability of p or more of x or less.
  *
  * @param p probability; 0 and 1 give the limits, ±Infinity where there are none
  */
@@ -53,7 +53,7 @@ export function quantile(marginal: Marginal, p: number): number {
     case 'lognormal':
       return lognormalQuantile(marginal, p);
     case 'uniform':
-      return marginal.low + p * (marginal.high - marginal.low);
+      return uniformQuantile(marginal, p);
     case 'triangular':
       return triangularQuantile(marginal, p);
     case 'pert':
@@ -65,7 +65,7 @@ export function quantile(marginal: Marginal, p: number): number {
   }
 }
 
-/** F(x). */
+/** F(x), the probability of x or less; NaN for NaN. */
 export function cumulative(marginal: Marginal, x: number): number {
   switch (marginal.kind) {
     case 'fixed':

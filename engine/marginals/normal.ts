@@ -1,4 +1,5 @@
 import { normalCumulative, normalDensity, normalQuantile } from './standardNormal.ts';
+import { momentsBetween } from './normalBetween.ts';
 
 /** Normal distribution, cut at `low` and `high`; mean and deviation are those before cutting. */
 export interface Normal {
@@ -23,48 +24,66 @@ export function makeNormal(input: {
   if (!Number.isFinite(mean)) return 'the mean must be a finite number';
   if (!(deviation > 0 && Number.isFinite(deviation))) return 'the deviation must be above 0';
   if (!(low < high)) return 'low must be below high';
-  const share = normalCumulative((high - mean) / deviation) - normalCumulative((low - mean) / deviation);
-  if (!(share >= LEAST_SHARE)) return 'less than a thousandth of the distribution lies between low and high';
-  return { kind: 'normal', mean, deviation, low, high };
+  const marginal: Normal = { kind: 'normal', mean, deviation, low, high };
+  if (!(shareLeft(marginal) >= LEAST_SHARE)) {
+    return 'less than a thousandth of the distribution lies between low and high';
+  }
+  return marginal;
 }
 
-/** Probabilities of the uncut distribution at the limits. */
-function limitShares({ mean, deviation, low, high }: Normal): readonly [number, number] {
-  return [normalCumulative((low - mean) / deviation), normalCumulative((high - mean) / deviation)];
+/** As seen from the tail that is nearer, so that no probability is rounded to 1: limits in scores, a ≤ −|…|. */
+interface Facing {
+  /** 1 as entered, −1 turned about the mean. */
+  readonly sign: 1 | -1;
+  readonly a: number;
+  readonly b: number;
+  /** Φ(a) and Φ(b) − Φ(a). */
+  readonly below: number;
+  readonly share: number;
+}
+
+function facing({ mean, deviation, low, high }: Normal): Facing {
+  const [lower, upper] = [(low - mean) / deviation, (high - mean) / deviation];
+  const isTurned = lower + upper > 0;
+  const [a, b] = isTurned ? [-upper, -lower] : [lower, upper];
+  const below = normalCumulative(a);
+  return { sign: isTurned ? -1 : 1, a, b, below, share: normalCumulative(b) - below };
+}
+
+function shareLeft(marginal: Normal): number {
+  return facing(marginal).share;
 }
 
 export function normalQuantileCut(marginal: Normal, p: number): number {
   const { mean, deviation, low, high } = marginal;
-  const [below, upTo] = limitShares(marginal);
-  const value = mean + deviation * normalQuantile(below + p * (upTo - below));
-  return Math.min(high, Math.max(low, value));
+  if (p === 0) return low;
+  if (p === 1) return high;
+  const { sign, below, share } = facing(marginal);
+  const score = sign * normalQuantile(Math.min(1, below + (sign > 0 ? p : 1 - p) * share));
+  return Math.min(high, Math.max(low, mean + deviation * score));
 }
 
 export function normalCumulativeCut(marginal: Normal, x: number): number {
   const { mean, deviation, low, high } = marginal;
   if (x <= low) return 0;
   if (x >= high) return 1;
-  const [below, upTo] = limitShares(marginal);
-  return (normalCumulative((x - mean) / deviation) - below) / (upTo - below);
+  const { sign, below, share } = facing(marginal);
+  const upTo = Math.min(1, Math.max(0, (normalCumulative((sign * (x - mean)) / deviation) - below) / share));
+  return sign > 0 ? upTo : 1 - upTo;
 }
 
 export function normalDensityCut(marginal: Normal, x: number): number {
   const { mean, deviation, low, high } = marginal;
   if (x < low || x > high) return 0;
-  const [below, upTo] = limitShares(marginal);
-  return normalDensity((x - mean) / deviation) / (deviation * (upTo - below));
+  return normalDensity((x - mean) / deviation) / (deviation * shareLeft(marginal));
 }
 
-/** Mean and deviation after cutting (Johnson, Kotz & Balakrishnan 1994, section 13.10.1). */
+/** Mean and deviation after cutting. */
 export function normalMoments(marginal: Normal): { readonly mean: number; readonly deviation: number } {
-  const { mean, deviation, low, high } = marginal;
-  const [a, b] = [(low - mean) / deviation, (high - mean) / deviation];
-  const [below, upTo] = limitShares(marginal);
-  const share = upTo - below;
-  const [densityLow, densityHigh] = [normalDensity(a), normalDensity(b)];
-  const shift = (densityLow - densityHigh) / share;
-  const atLow = Number.isFinite(a) ? a * densityLow : 0;
-  const atHigh = Number.isFinite(b) ? b * densityHigh : 0;
-  const variance = 1 + (atLow - atHigh) / share - shift * shift;
-  return { mean: mean + deviation * shift, deviation: deviation * Math.sqrt(Math.max(0, variance)) };
+  const { sign, a, b, share } = facing(marginal);
+  const between = momentsBetween(a, b, share);
+  return {
+    mean: marginal.mean + sign * marginal.deviation * between.mean,
+    deviation: marginal.deviation * between.deviation,
+  };
 }

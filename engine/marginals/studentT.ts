@@ -1,4 +1,4 @@
-import { inverseIncompleteBeta } from './incompleteBeta.ts';
+import { inverseWithComplement } from './incompleteBeta.ts';
 
 /**
  * Quantile of Student's t distribution, by P(|T| > t) = I_(ν/(ν+t²))(ν/2, ½).
@@ -13,7 +13,7 @@ export function studentTQuantile(p: number, degreesOfFreedom: number): number {
   }
   if (p === 0.5) return 0;
   const bothTails = 2 * Math.min(p, 1 - p);
-  const x = inverseIncompleteBeta(bothTails, 0.5 * degreesOfFreedom, 0.5);
-  const t = Math.sqrt((degreesOfFreedom * (1 - x)) / x);
+  const [x, y] = inverseWithComplement(bothTails, 0.5 * degreesOfFreedom, 0.5);
+  const t = Math.sqrt((degreesOfFreedom * y) / x);
   return p < 0.5 ? -t : t;
 }

@@ -48,6 +48,9 @@ export function triangularMoments({ low, mode, high }: Triangular): {
   readonly mean: number;
   readonly deviation: number;
 } {
-  const square = low * low + mode * mode + high * high - low * mode - low * high - mode * high;
-  return { mean: (low + mode + high) / 3, deviation: Math.sqrt(square / 18) };
+  const [left, right] = [mode - low, high - mode];
+  return {
+    mean: low + (2 * left + right) / 3,
+    deviation: Math.sqrt((left * left + left * right + right * right) / 18),
+  };
 }

@@ -15,3 +15,7 @@ export function makeUniform({
   if (!(Number.isFinite(low) && Number.isFinite(high))) return 'low and high must be finite numbers';
   return low < high ? { kind: 'uniform', low, high } : 'low must be below high';
 }
+
+export function uniformQuantile({ low, high }: Uniform, p: number): number {
+  return p < 0.5 ? low + p * (high - low) : high - (1 - p) * (high - low);
+}

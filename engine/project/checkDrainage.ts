@@ -8,6 +8,11 @@ import { thicknessAt, thicknessNumber } from './thicknessAt.ts';
 /** Diameter served by a drain over its spacing (Hansbo 1981). */
 const INFLUENCE = { triangular: 1.05, square: 1.13 };
 
+/** Diameter of the ground that one drain serves, m. */
+export function influenceOver({ pattern, spacing }: Drains): number {
+  return INFLUENCE[pattern] * spacing;
+}
+
 interface DrainedParts {
   readonly soils: Model['soils'] | undefined;
   readonly layers: Model['layers'] | undefined;
@@ -26,7 +31,7 @@ const DRAINS = { pointer: '/drains', path: 'drains' };
  */
 export function checkDrainage(reading: Reading, parts: DrainedParts): void {
   const { drains, vacuum, soils, layers, points } = parts;
-  const influence = INFLUENCE[drains.pattern] * drains.spacing;
+  const influence = influenceOver(drains);
   const smeared = drains.diameter * centralValue(drains.smearRatio);
   if (!(drains.diameter < influence)) {
     const found = `drains of ${shortNumber(drains.diameter)} m, each serving ${shortNumber(influence)} m of ground`;

@@ -72,7 +72,7 @@ export function checkProject(text: string): CheckResult {
   const opened = project && openObject(reading, WHOLE_PROJECT, project, PROJECT_KEYS);
   const model = opened && readModel(reading, opened);
   if (model === undefined || !reading.faults.isEmpty) return { ok: false, faults: reading.faults.all() };
-  const remarked = { ...model, remarks: remarksOf(model) };
+  const remarked = { ...model, remarks: remarksOf(model, reading.inputPlaces) };
   return { ok: true, model: { ...remarked, digest: modelDigest(remarked) } };
 }
 

@@ -55,16 +55,15 @@ export function isPositiveDefinite(matrix: readonly ArrayLike<number>[]): boolea
 export function firstBreakingPair(correlations: readonly RankCorrelation[]): number {
   if (isPositiveDefinite(correlationOfScores(correlations).matrix)) return -1;
   for (let count = 1; count <= correlations.length; count += 1) {
-    const linked = linkedTo(correlations.slice(0, count));
+    const linked = linkedTo(correlations.slice(0, count), count - 1);
     if (!isPositiveDefinite(correlationOfScores(linked).matrix)) return count - 1;
   }
   return -1;
 }
 
-/** Those of a list that hang together with its last, by shared inputs, in the list's order. */
-export function linkedTo(correlations: readonly RankCorrelation[]): RankCorrelation[] {
-  const last = correlations[correlations.length - 1];
-  const linked = new Set([last.first, last.second]);
+/** Those of a list that hang together with one of it, by shared inputs, in the list's order. */
+export function linkedTo(correlations: readonly RankCorrelation[], place: number): RankCorrelation[] {
+  const linked = new Set([correlations[place].first, correlations[place].second]);
   for (let before = 0; before < linked.size; ) {
     before = linked.size;
     for (const { first, second } of correlations) {

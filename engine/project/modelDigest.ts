@@ -5,11 +5,11 @@ const WITHOUT_EFFECT = new Set(['digest', 'notes', 'note', 'source', 'remarks', 
 
 /**
  * 32 hex digits that change with anything that can change a result, but for `sampling`, which is compared by
- * itself. The order of keys in the file, its notes and its sources do not matter, nor whether a default is
+ * itself. The project's name, the order of keys in the file, its notes and its sources do not matter, nor whether a default is
  * written out.
  */
 export function modelDigest(model: Omit<Model, 'digest'>): string {
-  return hash128(canonicalText(model));
+  return hash128(canonicalText({ ...model, name: '' }));
 }
 
 /** Text that is the same for the same values: keys sorted, numbers in their shortest form. */

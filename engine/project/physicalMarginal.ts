@@ -1,6 +1,5 @@
 import { exp } from '../elementary.ts';
 import { limits, type Marginal } from '../marginals/marginal.ts';
-import { describeFound } from './describeFound.ts';
 import { isBelowRange, rangeInWords, type NumberRange } from './numberRange.ts';
 import type { Place } from './place.ts';
 import type { Reading } from './reading.ts';
@@ -26,10 +25,6 @@ export function physicalMarginal(
   const { low, high } = reachOf(marginal);
   const below = isBelowRange(range, low);
   if (!below && high <= range.high) return marginal.kind === 'normal' ? cutAtRange(marginal, range) : marginal;
-  if (marginal.kind === 'fixed') {
-    reading.faults.add(place, describeFound(marginal.value), `a number ${rangeInWords(range)}`);
-    return undefined;
-  }
   const found = `values ${below ? 'down' : 'up'} to ${Number((below ? low : high).toPrecision(4))}`;
   reading.faults.add(place, found, `values ${rangeInWords(range)}${remedy(marginal, below)}`);
   return undefined;

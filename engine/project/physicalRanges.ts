@@ -1,5 +1,5 @@
 import { WATER_UNIT_WEIGHT } from '../units.ts';
-import { aboveUpTo, fromTo } from './numberRange.ts';
+import { aboveUpTo, betweenBoth, fromTo } from './numberRange.ts';
 
 /**
  * What each number of a project may be, in the unit of its key. Lower ends are those of physics; upper ends
@@ -53,6 +53,18 @@ export const PHYSICAL = {
   limitMillimetres: fromTo(0, 100_000),
   limitSlope: fromTo(0, 10),
   limitRate: fromTo(0, 1e6),
+} as const;
+
+/**
+ * What the central value (the median) of some numbers may be, where single realisations may go beyond: those
+ * are set back and counted.
+ */
+export const CENTRAL = {
+  indexRatio: betweenBoth(0, 1),
+  overconsolidationRatio: fromTo(1, 100),
+  preOverburden: fromTo(0, 10_000),
+  /** 1, but for what rounding does. */
+  thicknessFactor: fromTo(1 - 1e-6, 1 + 1e-6),
 } as const;
 
 /** How many of each a project may hold. */

@@ -1,4 +1,4 @@
-import { median } from '../marginals/marginal.ts';
+import { centralValue } from './centralValue.ts';
 import type {
   CompressibleSoil,
   IndexOrRatio,
@@ -8,9 +8,9 @@ import type {
 } from './model.ts';
 import type { NumberRange } from './numberRange.ts';
 import { exactlyOneKey, openObject, orElse, placeOfKey, type OpenedObject } from './openObject.ts';
-import { PHYSICAL } from './physicalRanges.ts';
+import { CENTRAL, PHYSICAL } from './physicalRanges.ts';
 import { placeWithin } from './place.ts';
-import { checkCentral, readUncertain, shortNumber, type UncertainSpec } from './readUncertain.ts';
+import { readUncertain, shortNumber, type UncertainSpec } from './readUncertain.ts';
 import { readList, readNumber } from './readValues.ts';
 import { whole, type Reading } from './reading.ts';
 
@@ -116,16 +116,17 @@ function indexOrRatio(
   const { reading, object } = source;
   const key = exactlyOneKey(reading, object, [`${called}_index`, `${called}_ratio`] as const);
   if (key === undefined) return undefined;
-  const isRatio = key.endsWith('ratio');
-  const number = soilNumber(source, key, isRatio ? PHYSICAL.indexRatio : PHYSICAL.index);
-  if (isRatio) {
-    checkCentral(reading, object, key, number?.marginal, (ratio) => ratio < 1, 'a central value below 1');
-  } else if (compressionIndex !== undefined) {
-    const most = median(compressionIndex.marginal);
-    const right = `a central value below that of the compression index, ${shortNumber(most)}`;
-    checkCentral(reading, object, key, number?.marginal, (index) => index < most, right);
+  if (key === `${called}_ratio`) {
+    const ratio = soilNumber(source, key, PHYSICAL.indexRatio, { central: CENTRAL.indexRatio });
+    return ratio && { given: 'ratio', number: ratio };
   }
-  return number && { given: isRatio ? 'ratio' : 'index', number };
+  const index = soilNumber(source, key, PHYSICAL.index);
+  if (index === undefined || compressionIndex === undefined) return undefined;
+  const [central, most] = [centralValue(index), centralValue(compressionIndex)];
+  if (central < most) return { given: 'index', number: index };
+  const right = `a central value below that of the compression index, ${shortNumber(most)}`;
+  reading.faults.add(placeOfKey(object, key), `a central value of ${shortNumber(central)}`, right);
+  return undefined;
 }
 
 function secondary(reading: Reading, source: SoilSource): IndexOrRatio | undefined {
@@ -146,12 +147,10 @@ function readPreconsolidation({ reading, object, owner }: SoilSource): Preconsol
   const source = { reading, object: opened, owner };
   if (kind === 'profile') return readProfile(source);
   if (kind === 'ocr') {
-    const ocr = soilNumber(source, kind, PHYSICAL.overconsolidationRatio);
-    checkCentral(reading, opened, kind, ocr?.marginal, (central) => central >= 1, 'a central OCR of 1 or more');
+    const ocr = soilNumber(source, kind, PHYSICAL.overconsolidationRatio, { central: CENTRAL.overconsolidationRatio });
     return ocr && { kind, ocr };
   }
-  const pop = soilNumber(source, kind, PHYSICAL.preOverburden);
-  checkCentral(reading, opened, kind, pop?.marginal, (central) => central >= 0, 'a central POP of 0 or more');
+  const pop = soilNumber(source, kind, PHYSICAL.preOverburden, { central: CENTRAL.preOverburden });
   return pop && { kind: 'pop', pop };
 }
 

@@ -3,6 +3,7 @@ import { describeFound, quoted } from './describeFound.ts';
 import type { RankCorrelation } from './model.ts';
 import { nearestRankCorrelations } from './nearestCorrelation.ts';
 import { nearestWord } from './nearestWord.ts';
+import { betweenBoth } from './numberRange.ts';
 import { openObject, placeOfKey, type OpenedObject } from './openObject.ts';
 import { MOST } from './physicalRanges.ts';
 import { placeWithin, type Place } from './place.ts';
@@ -11,7 +12,7 @@ import { whole, wholeList, type Reading } from './reading.ts';
 
 export const CORRELATION_KEYS = { required: ['between', 'rank_correlation'], optional: ['note'] } as const;
 /** Of a rank correlation; ±1 would make one input of two. */
-export const RANK = { low: -1, lowIncluded: false, high: 0.9999 };
+export const RANK = betweenBoth(-1, 1);
 const MOST_INPUTS = 150;
 
 /** Rank correlations between inputs, whose matrix is positive definite on the scores. */
@@ -78,7 +79,7 @@ function refuseIndefinite(reading: Reading, correlations: readonly RankCorrelati
   if (breaking < 0) return;
   const name = (input: number) => reading.inputs[input].name;
   const pairInWords = ({ first, second, rank }: RankCorrelation) => `${name(first)} with ${name(second)} ${rank}`;
-  const linked = linkedTo(correlations.slice(0, breaking + 1));
+  const linked = linkedTo(correlations, breaking);
   const offer = nearestRankCorrelations(linked);
   const right =
     offer === null

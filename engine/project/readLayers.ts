@@ -2,10 +2,10 @@ import { quoted } from './describeFound.ts';
 import type { Layer, Thickness } from './model.ts';
 import { nearestWord } from './nearestWord.ts';
 import { exactlyOneKey, inWords, openObject, orElse, placeOfKey, type OpenedObject } from './openObject.ts';
-import { MOST, PHYSICAL } from './physicalRanges.ts';
+import { CENTRAL, MOST, PHYSICAL } from './physicalRanges.ts';
 import type { Place } from './place.ts';
 import { fixedNumber } from './readCompressibleSoil.ts';
-import { checkCentral, readUncertain } from './readUncertain.ts';
+import { readUncertain } from './readUncertain.ts';
 import { readMembers, readName, readNumber, readText } from './readValues.ts';
 import { refuseSameNames, type Named } from './refuseSameNames.ts';
 import { whole, wholeList, type Reading } from './reading.ts';
@@ -69,13 +69,12 @@ function readThickness(
     readUncertain(reading, object, 'thickness_factor', {
       owner,
       range: PHYSICAL.thicknessFactor,
+      central: CENTRAL.thicknessFactor,
       called: 'thickness',
       words: 'factor on the thickness',
       varies: 'along the section',
     }),
   );
-  const isOne = (central: number) => Math.abs(central - 1) <= 1e-6;
-  checkCentral(reading, object, 'thickness_factor', factor?.marginal, isOne, 'a median of 1');
   const borings = readBorings(reading, object);
   if (borings === undefined || factor === undefined) return undefined;
   return { kind: 'borings', ...borings, factor };

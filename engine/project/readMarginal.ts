@@ -8,14 +8,12 @@ import { makePert } from '../marginals/pert.ts';
 import { makeTriangular } from '../marginals/triangular.ts';
 import { makeUniform } from '../marginals/uniform.ts';
 import { describeFound } from './describeFound.ts';
-import { aboveUpTo, fromTo } from './numberRange.ts';
-import { exactlyOneKey, type OpenedObject } from './openObject.ts';
+import { aboveUpTo, fromTo, type NumberRange } from './numberRange.ts';
+import { exactlyOneKey, placeOfKey, type OpenedObject } from './openObject.ts';
 import { MOST } from './physicalRanges.ts';
 import { placeWithin } from './place.ts';
-import { placeOfKey } from './openObject.ts';
 import { numberFrom, readList, readNumber } from './readValues.ts';
-import type { Reading } from './reading.ts';
-import { whole } from './reading.ts';
+import { whole, type Reading } from './reading.ts';
 
 export const MARGINAL_KINDS = [
   'fixed',
@@ -49,36 +47,55 @@ export const ANY_NUMBER = fromTo(-1e12, 1e12);
 export const POSITIVE_NUMBER = aboveUpTo(0, 1e12);
 /** Coefficient of variation. */
 export const VARIATION = aboveUpTo(0, 10);
+/** Shares of a cumulative table. */
+export const CUMULATIVE = fromTo(0, 1);
 /** Shapes of a beta distribution. */
 export const BETA_SHAPE = fromTo(0.05, 1e5);
 
-/** The marginal of an object that has been opened with the keys of its kind; undefined, with faults, if it is none. */
-export function readMarginal(reading: Reading, object: OpenedObject, kind: MarginalKind): Marginal | undefined {
-  const made = marginalOfKind(reading, object, kind);
+/**
+ * The marginal of an object that has been opened with the keys of its kind; undefined, with faults, if it is
+ * none.
+ *
+ * @param range in which every value that the file states must lie; a mean of a normal or lognormal need not
+ */
+export function readMarginal(
+  reading: Reading,
+  object: OpenedObject,
+  kind: MarginalKind,
+  range: NumberRange,
+): Marginal | undefined {
+  const made = marginalOfKind({ reading, object, range }, kind);
   if (typeof made !== 'string') return made;
   reading.faults.add(object.place, `a ${kind} marginal of ${numbersIn(object)}`, `one of which ${made}`);
   return undefined;
 }
 
-function marginalOfKind(reading: Reading, object: OpenedObject, kind: MarginalKind): Marginal | string | undefined {
-  const number = (key: string, range = ANY_NUMBER) => readNumber(reading, object, key, range);
+interface Source {
+  readonly reading: Reading;
+  readonly object: OpenedObject;
+  readonly range: NumberRange;
+}
+
+function marginalOfKind(source: Source, kind: MarginalKind): Marginal | string | undefined {
+  const value = (key: string) => readNumber(source.reading, source.object, key, source.range);
+  const threeNumbers = () => ({ low: value('low'), mode: value('best'), high: value('high') });
   switch (kind) {
     case 'fixed':
-      return made({ value: number('value') }, makeFixed);
+      return made({ value: value('value') }, makeFixed);
     case 'normal':
-      return normal(reading, object);
+      return normal(source);
     case 'lognormal':
-      return lognormal(reading, object);
+      return lognormal(source);
     case 'uniform':
-      return made({ low: number('low'), high: number('high') }, makeUniform);
+      return made({ low: value('low'), high: value('high') }, makeUniform);
     case 'triangular':
-      return made({ low: number('low'), mode: number('best'), high: number('high') }, makeTriangular);
+      return made(threeNumbers(), makeTriangular);
     case 'pert':
-      return made({ low: number('low'), mode: number('best'), high: number('high') }, makePert);
+      return made(threeNumbers(), makePert);
     case 'beta':
-      return beta(reading, object);
+      return beta(source);
     case 'table':
-      return made({ values: column(reading, object, 'values'), cumulative: column(reading, object, 'cumulative') }, makeTable);
+      return made({ values: column(source, 'values'), cumulative: column(source, 'cumulative') }, makeTable);
   }
 }
 
@@ -90,16 +107,16 @@ function made<T extends object>(
   return input === undefined ? undefined : make(input);
 }
 
-function normal(reading: Reading, object: OpenedObject): Marginal | string | undefined {
+function normal({ reading, object, range }: Source): Marginal | string | undefined {
   const mean = readNumber(reading, object, 'mean', ANY_NUMBER);
   const deviation = deviationBeside(reading, object, mean);
   const cuts = (['low', 'high'] as const).filter((key) => object.entries.has(key));
-  const read = cuts.map((key) => [key, readNumber(reading, object, key, ANY_NUMBER)] as const);
+  const read = cuts.map((key) => [key, readNumber(reading, object, key, range)] as const);
   if (read.some(([, value]) => value === undefined)) return undefined;
   return made({ mean, deviation }, (input) => makeNormal({ ...input, ...Object.fromEntries(read) }));
 }
 
-function lognormal(reading: Reading, object: OpenedObject): Marginal | string | undefined {
+function lognormal({ reading, object }: Source): Marginal | string | undefined {
   const middle = exactlyOneKey(reading, object, ['mean', 'median']);
   if (middle !== 'median') {
     const mean = middle && readNumber(reading, object, middle, POSITIVE_NUMBER);
@@ -116,10 +133,10 @@ function lognormal(reading: Reading, object: OpenedObject): Marginal | string | 
   return made({ median, cov: readNumber(reading, object, 'cov', VARIATION) }, makeLognormalFromMedian);
 }
 
-function beta(reading: Reading, object: OpenedObject): Marginal | string | undefined {
+function beta({ reading, object, range }: Source): Marginal | string | undefined {
   const limits = {
-    low: readNumber(reading, object, 'low', ANY_NUMBER),
-    high: readNumber(reading, object, 'high', ANY_NUMBER),
+    low: readNumber(reading, object, 'low', range),
+    high: readNumber(reading, object, 'high', range),
   };
   const form = exactlyOneKey(reading, object, ['alpha', 'mean']);
   const strangers = form === 'alpha' ? ['mean', 'cov', 'deviation'] : ['alpha', 'beta'];
@@ -136,7 +153,7 @@ function beta(reading: Reading, object: OpenedObject): Marginal | string | undef
     const shape = (key: string) => readNumber(reading, object, key, BETA_SHAPE);
     return made({ ...limits, alpha: shape('alpha'), beta: shape('beta') }, makeBeta);
   }
-  const mean = form && readNumber(reading, object, form, ANY_NUMBER);
+  const mean = form && readNumber(reading, object, form, range);
   const deviation = form && deviationBeside(reading, object, mean);
   return made({ ...limits, mean, deviation }, makeBetaFromMoments);
 }
@@ -152,12 +169,12 @@ function deviationBeside(reading: Reading, object: OpenedObject, mean: number | 
   return undefined;
 }
 
-function column(reading: Reading, object: OpenedObject, key: 'values' | 'cumulative'): number[] | undefined {
+function column({ reading, object, range }: Source, key: 'values' | 'cumulative'): number[] | undefined {
   const list = readList(reading, object, key, { least: 2, most: MOST.tableRows });
-  const range = key === 'values' ? ANY_NUMBER : fromTo(0, 1);
+  const allowed = key === 'values' ? range : CUMULATIVE;
   const numbers = list?.map((value, i) => {
     const place = placeWithin(placeOfKey(object, key), i, `row ${i + 1}`);
-    return numberFrom(reading, place, value, range);
+    return numberFrom(reading, place, value, allowed);
   });
   return numbers?.includes(undefined) === false ? (numbers as number[]) : undefined;
 }

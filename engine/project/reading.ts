@@ -1,6 +1,7 @@
 import { isUncertain } from '../marginals/marginal.ts';
 import { FaultList } from './faultList.ts';
 import type { UncertainNumber } from './model.ts';
+import type { Place } from './place.ts';
 
 /** What builds up while one file is read: its faults and its inputs. */
 export class Reading {
@@ -9,15 +10,18 @@ export class Reading {
   /** Permanent names of numbers that are fixed, or could not be read. */
   readonly fixedNames = new Set<string>();
   readonly brokenNames = new Set<string>();
+  /** Where in the file each input stands, in the order of `inputs`. */
+  readonly inputPlaces: Place[] = [];
 
   /** Takes a number into the model, with its place among the inputs where it is uncertain. */
-  enter(number: Omit<UncertainNumber, 'index'>): UncertainNumber {
+  enter(place: Place, number: Omit<UncertainNumber, 'index'>): UncertainNumber {
     if (!isUncertain(number.marginal)) {
       this.fixedNames.add(number.name);
       return { ...number, index: -1 };
     }
     const entered = { ...number, index: this.inputs.length };
     this.inputs.push(entered);
+    this.inputPlaces.push(place);
     return entered;
   }
 }

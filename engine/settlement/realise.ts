@@ -18,7 +18,7 @@ import {
 import { intervalsOf } from './timeGrid.ts';
 
 /** Cells and steps of everyday work: the accuracy that goes with them is measured in the tests. */
-export const WORKING_RESOLUTION: Resolution = { cells: 60, steps: 8 };
+export const WORKING_RESOLUTION: Resolution = { cells: 60, steps: 16 };
 
 /** The settlements of all realisations of a drawn ground at all points of a model. */
 export function realise(

@@ -75,7 +75,7 @@ describe('the built page, below a sub-path', () => {
     await open(file);
     expect(await heading().textContent()).toBe('Second crossing');
     await done('1,000');
-    const summary = await studyInNode(file.buffer.toString('utf8'));
+    const summary = studyInNode(file.buffer.toString('utf8'));
     const result = summary.quantities[summary.limits[0].quantity];
     await page.getByRole('button', { name: summary.model.limits[0].name }).first().click();
     const download = page.waitForEvent('download');

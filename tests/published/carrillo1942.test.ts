@@ -41,7 +41,12 @@ describe('Carrillo 1942, vertical and radial flow together', () => {
       horizon: date,
     });
     const coarse = { cells: 16, steps: 128 };
-    const ch = whereReached(radial, (c) => linearConsolidation(ofRadial(c), coarse).degreeAt(date), 1e-3, 1e3);
+    const ch = whereReached(
+      radial,
+      (c) => linearConsolidation(ofRadial(c), coarse).degreeAt(date),
+      1e-3,
+      1e3,
+    );
     const { degreeAt } = linearConsolidation({
       linear: [{ thickness: THICKNESS, cv, horizontalRatio: ch / cv }],
       drains,

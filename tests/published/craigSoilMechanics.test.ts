@@ -26,8 +26,12 @@ describe('Craig, wide fill on sand over clay', () => {
     voidRatio: 0.88 - 0.32 * Math.log10(1.198),
     cv: 1.26,
   };
-  const fill = { lifts: [{ thickness: 3, unitWeight: 20, placing: [0, 1] as const }], base: 'closed' as const };
-  const final = 1000 * marchedModel({ layers: layersOfUniformClay(clay), ...fill, horizon: 300 }).settlementAt(300);
+  const fill = {
+    lifts: [{ thickness: 3, unitWeight: 20, placing: [0, 1] as const }],
+    base: 'closed' as const,
+  };
+  const final =
+    1000 * marchedModel({ layers: layersOfUniformClay(clay), ...fill, horizon: 300 }).settlementAt(300);
 
   const afterThreeYears = (layers: Plain['layers'], base: Plain['base']) =>
     1000 * marchedModel({ layers, ...fill, base, horizon: 3 }).settlementAt(3);
@@ -53,10 +57,13 @@ describe('Craig, wide fill on sand over clay', () => {
   it.each([
     ['above', 4.5, 'drained', 0.825],
     ['below', 1.5, 'closed', 0.97],
-  ] as const)('the part %s that layer, %f m with its base %s, is consolidated by %f', (_, thickness, base, degree) => {
-    const settled = afterThreeYears([layer(thickness)], base);
-    expect(Math.abs((settled * 6) / thickness / final - degree)).toBeLessThan(0.006);
-  });
+  ] as const)(
+    'the part %s that layer, %f m with its base %s, is consolidated by %f',
+    (_, thickness, base, degree) => {
+      const settled = afterThreeYears([layer(thickness)], base);
+      expect(Math.abs((settled * 6) / thickness / final - degree)).toBeLessThan(0.006);
+    },
+  );
 });
 
 describe('Craig, raft on sand over clay', () => {
@@ -108,7 +115,11 @@ describe('Craig, problem 7.8', () => {
   });
 
   it('with drains it takes 0.7 years', () => {
-    const { degreeAt } = linearConsolidation({ ...given, drains: { ...drains, spacing: 4, foot: 10 }, horizon: 1 });
+    const { degreeAt } = linearConsolidation({
+      ...given,
+      drains: { ...drains, spacing: 4, foot: 10 },
+      horizon: 1,
+    });
     expect(degreeAt(0.65)).toBeLessThan(0.9);
     expect(degreeAt(0.75)).toBeGreaterThan(0.9);
   });

@@ -29,20 +29,31 @@ describe('Das, time of consolidation', () => {
   const cv = (0.196735 * 0.0125 * 0.0125) / (140 / SECONDS);
 
   it('the specimen of 25 mm that is half consolidated in 140 s belongs to a layer of 3 m, drained at one face, half consolidated in 93.33 days', () => {
-    const field = linearConsolidation({ linear: [{ thickness: 3, cv }], base: 'closed', horizon: 200 / DAYS });
+    const field = linearConsolidation({
+      linear: [{ thickness: 3, cv }],
+      base: 'closed',
+      horizon: 200 / DAYS,
+    });
     const specimen = linearConsolidation({ linear: [{ thickness: 0.025, cv }], horizon: 400 / SECONDS });
     expect(Math.abs(specimen.degreeAt(140 / SECONDS) - 0.5)).toBeLessThan(ON_FINE_GRID);
     expect(Math.abs(field.degreeAt(93.33 / DAYS) - 0.5)).toBeLessThan(ON_FINE_GRID);
   });
 
   it('the same layer is consolidated by 30 % in 33.5 days', () => {
-    const field = linearConsolidation({ linear: [{ thickness: 3, cv }], base: 'closed', horizon: 200 / DAYS });
+    const field = linearConsolidation({
+      linear: [{ thickness: 3, cv }],
+      base: 'closed',
+      horizon: 200 / DAYS,
+    });
     // 0.3 days (the reference tolerance) are 0.3/33.5/2 of U = 0.3
     expect(Math.abs(field.degreeAt(33.5 / DAYS) - 0.3)).toBeLessThan(ON_FINE_GRID + (0.3 * 0.3) / (2 * 33.5));
   });
 
   it('3 m drained at both faces reach 90 % in 75 days with c_v = 0.00294 cm²/s', () => {
-    const { degreeAt } = linearConsolidation({ linear: [{ thickness: 3, cv: perYear(0.00294) }], horizon: 0.5 });
+    const { degreeAt } = linearConsolidation({
+      linear: [{ thickness: 3, cv: perYear(0.00294) }],
+      horizon: 0.5,
+    });
     // c_v printed to 5e-6 of 0.00294: 0.17 % of T, at dU/dT · T = π²/4 · 0.848 · 0.1
     expect(Math.abs(degreeAt(75 / DAYS) - 0.9)).toBeLessThan(ON_FINE_GRID + 0.0017 * 0.21);
   });
@@ -65,11 +76,14 @@ describe('Das, vertical stress', () => {
     [3, 0.48, 96.0],
     [6, 0.084, 16.8],
     [9, 0.017, 3.4],
-  ])('below a strip of 6 m and 200 kPa, 3 m deep and %f m aside, the ratio is %f (%f kPa)', (x, ratio, stress) => {
-    const found = stressIncrease([{ x1: -3, q1: 200, x2: 3, q2: 200 }], ENDLESS, false, x, 3);
-    expect(Math.abs(found / 200 - ratio)).toBeLessThan(5e-4);
-    expect(Math.abs(found - stress)).toBeLessThan(0.1);
-  });
+  ])(
+    'below a strip of 6 m and 200 kPa, 3 m deep and %f m aside, the ratio is %f (%f kPa)',
+    (x, ratio, stress) => {
+      const found = stressIncrease([{ x1: -3, q1: 200, x2: 3, q2: 200 }], ENDLESS, false, x, 3);
+      expect(Math.abs(found / 200 - ratio)).toBeLessThan(5e-4);
+      expect(Math.abs(found - stress)).toBeLessThan(0.1);
+    },
+  );
 
   it('at 2x/B = 1.2 and 2z/B = 0.8 the ratio is 0.338', () => {
     const found = stressIncrease([{ x1: -1, q1: 1, x2: 1, q2: 1 }], ENDLESS, false, 1.2, 0.8);

@@ -42,63 +42,74 @@ const CAPACITIES: readonly (readonly [number, number])[] = [
   [5, 0.40605],
 ];
 /** Pattern, spacing, dw, s, k_h/k_s, μ, t90 in years with c_h = 2 m²/year. */
-const TIMES_TO_NINETY: readonly (readonly ['triangular' | 'square', number, number, number, number, number, number])[] = [
-  ["triangular", 1.0, 0.0662, 1, 1, 2.0139, 0.3196],
-  ["triangular", 1.0, 0.0662, 3, 2, 3.1125, 0.4939],
-  ["triangular", 1.0, 0.0662, 3, 4, 5.3098, 0.8426],
-  ["triangular", 1.0, 0.052, 1, 1, 2.2554, 0.3579],
-  ["triangular", 1.0, 0.052, 3, 2, 3.354, 0.5322],
-  ["triangular", 1.0, 0.052, 3, 4, 5.5512, 0.8809],
-  ["triangular", 1.2, 0.0662, 1, 1, 2.1963, 0.5019],
-  ["triangular", 1.2, 0.0662, 3, 2, 3.2949, 0.7529],
-  ["triangular", 1.2, 0.0662, 3, 4, 5.4921, 1.255],
-  ["triangular", 1.2, 0.052, 1, 1, 2.4377, 0.557],
-  ["triangular", 1.2, 0.052, 3, 2, 3.5363, 0.8081],
-  ["triangular", 1.2, 0.052, 3, 4, 5.7335, 1.3102],
-  ["triangular", 1.5, 0.0662, 1, 1, 2.4194, 0.8638],
-  ["triangular", 1.5, 0.0662, 3, 2, 3.518, 1.2561],
-  ["triangular", 1.5, 0.0662, 3, 4, 5.7152, 2.0406],
-  ["triangular", 1.5, 0.052, 1, 1, 2.6608, 0.95],
-  ["triangular", 1.5, 0.052, 3, 2, 3.7595, 1.3423],
-  ["triangular", 1.5, 0.052, 3, 4, 5.9567, 2.1268],
-  ["triangular", 2.0, 0.0662, 1, 1, 2.7071, 1.7183],
-  ["triangular", 2.0, 0.0662, 3, 2, 3.8057, 2.4156],
-  ["triangular", 2.0, 0.0662, 3, 4, 6.0029, 3.8103],
-  ["triangular", 2.0, 0.052, 1, 1, 2.9485, 1.8715],
-  ["triangular", 2.0, 0.052, 3, 2, 4.0471, 2.5689],
-  ["triangular", 2.0, 0.052, 3, 4, 6.2444, 3.9635],
-  ["square", 1.0, 0.0662, 1, 1, 2.0859, 0.3822],
-  ["square", 1.0, 0.0662, 3, 2, 3.1845, 0.5835],
-  ["square", 1.0, 0.0662, 3, 4, 5.3817, 0.9861],
-  ["square", 1.0, 0.052, 1, 1, 2.3273, 0.4264],
-  ["square", 1.0, 0.052, 3, 2, 3.4259, 0.6277],
-  ["square", 1.0, 0.052, 3, 4, 5.6231, 1.0303],
-  ["square", 1.2, 0.0662, 1, 1, 2.2682, 0.5985],
-  ["square", 1.2, 0.0662, 3, 2, 3.3668, 0.8884],
-  ["square", 1.2, 0.0662, 3, 4, 5.564, 1.4681],
-  ["square", 1.2, 0.052, 1, 1, 2.5096, 0.6622],
-  ["square", 1.2, 0.052, 3, 2, 3.6082, 0.9521],
-  ["square", 1.2, 0.052, 3, 4, 5.8055, 1.5318],
-  ["square", 1.5, 0.0662, 1, 1, 2.4913, 1.0271],
-  ["square", 1.5, 0.0662, 3, 2, 3.5899, 1.48],
-  ["square", 1.5, 0.0662, 3, 4, 5.7872, 2.3859],
-  ["square", 1.5, 0.052, 1, 1, 2.7328, 1.1267],
-  ["square", 1.5, 0.052, 3, 2, 3.8314, 1.5796],
-  ["square", 1.5, 0.052, 3, 4, 6.0286, 2.4854],
-  ["square", 2.0, 0.0662, 1, 1, 2.779, 2.0368],
-  ["square", 2.0, 0.0662, 3, 2, 3.8776, 2.842],
-  ["square", 2.0, 0.0662, 3, 4, 6.0748, 4.4525],
-  ["square", 2.0, 0.052, 1, 1, 3.0204, 2.2138],
-  ["square", 2.0, 0.052, 3, 2, 4.1191, 3.019],
-  ["square", 2.0, 0.052, 3, 4, 6.3163, 4.6294],
+const TIMES_TO_NINETY: readonly (readonly [
+  'triangular' | 'square',
+  number,
+  number,
+  number,
+  number,
+  number,
+  number,
+])[] = [
+  ['triangular', 1.0, 0.0662, 1, 1, 2.0139, 0.3196],
+  ['triangular', 1.0, 0.0662, 3, 2, 3.1125, 0.4939],
+  ['triangular', 1.0, 0.0662, 3, 4, 5.3098, 0.8426],
+  ['triangular', 1.0, 0.052, 1, 1, 2.2554, 0.3579],
+  ['triangular', 1.0, 0.052, 3, 2, 3.354, 0.5322],
+  ['triangular', 1.0, 0.052, 3, 4, 5.5512, 0.8809],
+  ['triangular', 1.2, 0.0662, 1, 1, 2.1963, 0.5019],
+  ['triangular', 1.2, 0.0662, 3, 2, 3.2949, 0.7529],
+  ['triangular', 1.2, 0.0662, 3, 4, 5.4921, 1.255],
+  ['triangular', 1.2, 0.052, 1, 1, 2.4377, 0.557],
+  ['triangular', 1.2, 0.052, 3, 2, 3.5363, 0.8081],
+  ['triangular', 1.2, 0.052, 3, 4, 5.7335, 1.3102],
+  ['triangular', 1.5, 0.0662, 1, 1, 2.4194, 0.8638],
+  ['triangular', 1.5, 0.0662, 3, 2, 3.518, 1.2561],
+  ['triangular', 1.5, 0.0662, 3, 4, 5.7152, 2.0406],
+  ['triangular', 1.5, 0.052, 1, 1, 2.6608, 0.95],
+  ['triangular', 1.5, 0.052, 3, 2, 3.7595, 1.3423],
+  ['triangular', 1.5, 0.052, 3, 4, 5.9567, 2.1268],
+  ['triangular', 2.0, 0.0662, 1, 1, 2.7071, 1.7183],
+  ['triangular', 2.0, 0.0662, 3, 2, 3.8057, 2.4156],
+  ['triangular', 2.0, 0.0662, 3, 4, 6.0029, 3.8103],
+  ['triangular', 2.0, 0.052, 1, 1, 2.9485, 1.8715],
+  ['triangular', 2.0, 0.052, 3, 2, 4.0471, 2.5689],
+  ['triangular', 2.0, 0.052, 3, 4, 6.2444, 3.9635],
+  ['square', 1.0, 0.0662, 1, 1, 2.0859, 0.3822],
+  ['square', 1.0, 0.0662, 3, 2, 3.1845, 0.5835],
+  ['square', 1.0, 0.0662, 3, 4, 5.3817, 0.9861],
+  ['square', 1.0, 0.052, 1, 1, 2.3273, 0.4264],
+  ['square', 1.0, 0.052, 3, 2, 3.4259, 0.6277],
+  ['square', 1.0, 0.052, 3, 4, 5.6231, 1.0303],
+  ['square', 1.2, 0.0662, 1, 1, 2.2682, 0.5985],
+  ['square', 1.2, 0.0662, 3, 2, 3.3668, 0.8884],
+  ['square', 1.2, 0.0662, 3, 4, 5.564, 1.4681],
+  ['square', 1.2, 0.052, 1, 1, 2.5096, 0.6622],
+  ['square', 1.2, 0.052, 3, 2, 3.6082, 0.9521],
+  ['square', 1.2, 0.052, 3, 4, 5.8055, 1.5318],
+  ['square', 1.5, 0.0662, 1, 1, 2.4913, 1.0271],
+  ['square', 1.5, 0.0662, 3, 2, 3.5899, 1.48],
+  ['square', 1.5, 0.0662, 3, 4, 5.7872, 2.3859],
+  ['square', 1.5, 0.052, 1, 1, 2.7328, 1.1267],
+  ['square', 1.5, 0.052, 3, 2, 3.8314, 1.5796],
+  ['square', 1.5, 0.052, 3, 4, 6.0286, 2.4854],
+  ['square', 2.0, 0.0662, 1, 1, 2.779, 2.0368],
+  ['square', 2.0, 0.0662, 3, 2, 3.8776, 2.842],
+  ['square', 2.0, 0.0662, 3, 4, 6.0748, 4.4525],
+  ['square', 2.0, 0.052, 1, 1, 3.0204, 2.2138],
+  ['square', 2.0, 0.052, 3, 2, 4.1191, 3.019],
+  ['square', 2.0, 0.052, 3, 4, 6.3163, 4.6294],
 ];
 
 describe('Hansbo 1981, factor with smear', () => {
-  it.each(SMEARED)('for n = %f, s = %f, k_h/k_s = %f the simplified factor is %f (exact %f)', (n, s, ratio, simple, exact) => {
-    expect(Math.abs(smearedDrainFactor(n, s, ratio) - simple)).toBeLessThan(1e-6);
-    // what the simplification leaves out goes with 1/n²
-    expect(Math.abs(smearedDrainFactor(n, s, ratio) - exact)).toBeLessThan((2 * exact) / n);
-  });
+  it.each(SMEARED)(
+    'for n = %f, s = %f, k_h/k_s = %f the simplified factor is %f (exact %f)',
+    (n, s, ratio, simple, exact) => {
+      expect(Math.abs(smearedDrainFactor(n, s, ratio) - simple)).toBeLessThan(1e-6);
+      // what the simplification leaves out goes with 1/n²
+      expect(Math.abs(smearedDrainFactor(n, s, ratio) - exact)).toBeLessThan((2 * exact) / n);
+    },
+  );
 });
 
 describe('Hansbo 1981, well resistance', () => {
@@ -110,27 +121,30 @@ describe('Hansbo 1981, well resistance', () => {
     expect(Math.abs(factor - expected)).toBeLessThan(1e-5);
   });
 
-  it.each(CAPACITIES)('with q_w = %f m³/year the degree over the whole depth at Th = 0.3 is %f', (capacity, expected) => {
-    const modulus = 1000;
-    const ch = (horizontal * modulus) / WATER_UNIT_WEIGHT;
-    const [influence, flat] = [1.05, 1e-9];
-    const date = (0.3 * influence * influence) / ch;
-    const { degreeAt } = linearConsolidation({
-      linear: [{ thickness: 10, modulus, cv: flat * ch, horizontalRatio: 1 / flat }],
-      drains: {
-        pattern: 'triangular',
-        spacing: 1,
-        diameter: influence / 20,
-        smearRatio: 3,
-        permeabilityRatio: 2,
-        dischargeCapacity: capacity,
-        foot: 10,
-      },
-      base: 'closed',
-      horizon: date,
-    });
-    expect(Math.abs(degreeAt(date) - expected)).toBeLessThan(ON_FINE_GRID);
-  });
+  it.each(CAPACITIES)(
+    'with q_w = %f m³/year the degree over the whole depth at Th = 0.3 is %f',
+    (capacity, expected) => {
+      const modulus = 1000;
+      const ch = (horizontal * modulus) / WATER_UNIT_WEIGHT;
+      const [influence, flat] = [1.05, 1e-9];
+      const date = (0.3 * influence * influence) / ch;
+      const { degreeAt } = linearConsolidation({
+        linear: [{ thickness: 10, modulus, cv: flat * ch, horizontalRatio: 1 / flat }],
+        drains: {
+          pattern: 'triangular',
+          spacing: 1,
+          diameter: influence / 20,
+          smearRatio: 3,
+          permeabilityRatio: 2,
+          dischargeCapacity: capacity,
+          foot: 10,
+        },
+        base: 'closed',
+        horizon: date,
+      });
+      expect(Math.abs(degreeAt(date) - expected)).toBeLessThan(ON_FINE_GRID);
+    },
+  );
 });
 
 describe('Hansbo 1979 and 1981, diameters', () => {

@@ -8,7 +8,6 @@
  * 0.05 mm.
  */
 import { describe, expect, it } from 'vitest';
-import { marchedModel } from '../engine/settlement/marchedColumn.ts';
 import { linearConsolidation, solved, linearColumn } from './linearConsolidation.ts';
 
 /** T, U. */
@@ -66,7 +65,9 @@ describe('Heriot-Watt class example 11, settlement from a profile of stress', ()
       return stresses[below - 1] + share * (stresses[below] - stresses[below - 1]);
     };
     // layers between the given depths, so that cells meet the bends of the profile
-    const linear = depths.slice(1).map((depth, i) => ({ thickness: depth - depths[i], modulus: 5000, cv: 100 }));
+    const linear = depths
+      .slice(1)
+      .map((depth, i) => ({ thickness: depth - depths[i], modulus: 5000, cv: 100 }));
     const { settlementAt } = linearConsolidation({ linear, horizon: 100, shape: (z) => stressAt(z) / 100 });
     expect(Math.abs(1000 * settlementAt(100) - 27.1)).toBeLessThan(0.05);
   });

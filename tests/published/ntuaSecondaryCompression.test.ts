@@ -41,12 +41,15 @@ describe('NTUA note, secondary compression after the end of primary', () => {
     expect(Math.abs(secondaryAt(times) - expected)).toBeLessThan(2e-4);
   });
 
-  it.each([5, 10, 20])('between twice and %f times that time it grows by the difference of the printed values', (times) => {
-    const [first] = EXPECTED;
-    const [, later] = EXPECTED.find(([of]) => of === times)!;
-    // two values of five digits each
-    expect(Math.abs(secondaryAt(times) - secondaryAt(2) - (later - first[1]))).toBeLessThan(2e-5);
-  });
+  it.each([5, 10, 20])(
+    'between twice and %f times that time it grows by the difference of the printed values',
+    (times) => {
+      const [first] = EXPECTED;
+      const [, later] = EXPECTED.find(([of]) => of === times)!;
+      // two values of five digits each
+      expect(Math.abs(secondaryAt(times) - secondaryAt(2) - (later - first[1]))).toBeLessThan(2e-5);
+    },
+  );
 
   it('nothing comes before it', () => expect(Math.abs(secondaryAt(0.99))).toBeLessThan(2e-4));
 });

@@ -56,14 +56,17 @@ describe('Poulos & Davis 1974, uniform strip', () => {
 });
 
 describe('Poulos & Davis 1974, symmetrical embankment', () => {
-  it.each(EMBANKMENT)('with half crest %f m and slope %f m, %f m deep, the stress across is %j', (half, slope, z, expected) => {
-    const thickness = 4;
-    const side = slope / thickness;
-    const lift = { crestCentre: 0, crestWidth: 2 * half, leftSlope: side, rightSlope: side, thickness };
-    const pieces = liftPressure(lift, 20, [], 0);
-    [0, half, half + 0.5 * slope, half + slope, half + slope + 2].forEach((x, i) => {
-      const ratio = stressIncrease(pieces, ENDLESS, false, x, z) / (20 * thickness);
-      expect(Math.abs(ratio - expected[i])).toBeLessThan(1e-5);
-    });
-  });
+  it.each(EMBANKMENT)(
+    'with half crest %f m and slope %f m, %f m deep, the stress across is %j',
+    (half, slope, z, expected) => {
+      const thickness = 4;
+      const side = slope / thickness;
+      const lift = { crestCentre: 0, crestWidth: 2 * half, leftSlope: side, rightSlope: side, thickness };
+      const pieces = liftPressure(lift, 20, [], 0);
+      [0, half, half + 0.5 * slope, half + slope, half + slope + 2].forEach((x, i) => {
+        const ratio = stressIncrease(pieces, ENDLESS, false, x, z) / (20 * thickness);
+        expect(Math.abs(ratio - expected[i])).toBeLessThan(1e-5);
+      });
+    },
+  );
 });

@@ -10,10 +10,10 @@ import { describe, expect, it } from 'vitest';
 import { linearConsolidation, ON_FINE_GRID } from './linearConsolidation.ts';
 
 const DRAINED_LAYERS = [
-  { thickness: 3.05, cv: 0.00381888 * 365.25, modulus: 1 / 6.41e-05 },
-  { thickness: 6.1, cv: 0.0177984 * 365.25, modulus: 1 / 4.07e-05 },
-  { thickness: 9.14, cv: 0.00508896 * 365.25, modulus: 1 / 2.03e-05 },
-  { thickness: 6.1, cv: 0.00636768 * 365.25, modulus: 1 / 4.07e-05 },
+  { thickness: 3.05, cv: 0.00381888 * 365.25, modulus: 1 / 6.41e-5 },
+  { thickness: 6.1, cv: 0.0177984 * 365.25, modulus: 1 / 4.07e-5 },
+  { thickness: 9.14, cv: 0.00508896 * 365.25, modulus: 1 / 2.03e-5 },
+  { thickness: 6.1, cv: 0.00636768 * 365.25, modulus: 1 / 4.07e-5 },
 ];
 const DRAINED_DEPTHS = [1.525, 3.05, 6.1, 9.15, 13.72, 18.29, 21.34];
 /** Time in days, U by settlement, u/u0 at the depths. */
@@ -45,10 +45,10 @@ describe('Schiffman & Stein 1970, four layers, drained at both ends', () => {
   );
 });
 const CLOSED_LAYERS = [
-  { thickness: 3.05, cv: 0.00381888 * 365.25, modulus: 1 / 6.41e-05 },
-  { thickness: 6.1, cv: 0.0177984 * 365.25, modulus: 1 / 4.07e-05 },
-  { thickness: 9.14, cv: 0.00508896 * 365.25, modulus: 1 / 2.03e-05 },
-  { thickness: 6.1, cv: 0.00636768 * 365.25, modulus: 1 / 4.07e-05 },
+  { thickness: 3.05, cv: 0.00381888 * 365.25, modulus: 1 / 6.41e-5 },
+  { thickness: 6.1, cv: 0.0177984 * 365.25, modulus: 1 / 4.07e-5 },
+  { thickness: 9.14, cv: 0.00508896 * 365.25, modulus: 1 / 2.03e-5 },
+  { thickness: 6.1, cv: 0.00636768 * 365.25, modulus: 1 / 4.07e-5 },
 ];
 const CLOSED_DEPTHS = [1.525, 3.05, 6.1, 9.15, 13.72, 18.29, 21.34, 24.39];
 /** Time in days, U by settlement, u/u0 at the depths. */

@@ -88,20 +88,26 @@ describe('Terzaghi 1923, time factor at which a degree is reached', () => {
     base: 'closed',
     horizon: yearsOf(2.8),
   });
-  it.each(TIME_FACTORS)('a degree of %f is reached at Tv = %f by a half-closed layer', (degree, timeFactor) => {
-    expect(Math.abs(degreeAt(yearsOf(timeFactor)) - degree)).toBeLessThan(ON_FINE_GRID);
-  });
+  it.each(TIME_FACTORS)(
+    'a degree of %f is reached at Tv = %f by a half-closed layer',
+    (degree, timeFactor) => {
+      expect(Math.abs(degreeAt(yearsOf(timeFactor)) - degree)).toBeLessThan(ON_FINE_GRID);
+    },
+  );
 });
 
 describe('Terzaghi 1923, isochrones', () => {
-  it.each(ISOCHRONES)('at Tv = %f the excess pore pressure is %j of the initial one', (timeFactor, expected) => {
-    const { porePressureAt } = linearConsolidation({ ...doubly, horizon: yearsOf(timeFactor) });
-    DEPTHS.forEach((depth, i) => {
-      expect(Math.abs(porePressureAt(depth * LONGEST_PATH) - expected[i])).toBeLessThan(ON_FINE_GRID);
-      const fromBase = 2 * LONGEST_PATH - depth * LONGEST_PATH;
-      expect(Math.abs(porePressureAt(fromBase) - expected[i])).toBeLessThan(ON_FINE_GRID);
-    });
-  });
+  it.each(ISOCHRONES)(
+    'at Tv = %f the excess pore pressure is %j of the initial one',
+    (timeFactor, expected) => {
+      const { porePressureAt } = linearConsolidation({ ...doubly, horizon: yearsOf(timeFactor) });
+      DEPTHS.forEach((depth, i) => {
+        expect(Math.abs(porePressureAt(depth * LONGEST_PATH) - expected[i])).toBeLessThan(ON_FINE_GRID);
+        const fromBase = 2 * LONGEST_PATH - depth * LONGEST_PATH;
+        expect(Math.abs(porePressureAt(fromBase) - expected[i])).toBeLessThan(ON_FINE_GRID);
+      });
+    },
+  );
 });
 
 describe('Terzaghi 1923, on the working grid', () => {

@@ -24,14 +24,17 @@ const CASES: readonly (readonly [number, number, number, number])[] = [
 ];
 
 describe('Terzaghi 1943, half of the construction time', () => {
-  it.each(CASES)('with Tc = %f at Tv = %f the degree lies at %f, not above the rule\'s %f', (end, timeFactor, exact, rule) => {
-    const { degreeAt } = linearConsolidation({
-      linear: [{ thickness: 2, cv: 1 }],
-      loads: [],
-      lifts: [{ thickness: 5, placing: [0, end] }],
-      horizon: 1,
-    });
-    expect(Math.abs(degreeAt(timeFactor) - exact)).toBeLessThan(ON_FINE_GRID);
-    expect(degreeAt(timeFactor)).toBeLessThan(rule + ON_FINE_GRID);
-  });
+  it.each(CASES)(
+    "with Tc = %f at Tv = %f the degree lies at %f, not above the rule's %f",
+    (end, timeFactor, exact, rule) => {
+      const { degreeAt } = linearConsolidation({
+        linear: [{ thickness: 2, cv: 1 }],
+        loads: [],
+        lifts: [{ thickness: 5, placing: [0, end] }],
+        horizon: 1,
+      });
+      expect(Math.abs(degreeAt(timeFactor) - exact)).toBeLessThan(ON_FINE_GRID);
+      expect(degreeAt(timeFactor)).toBeLessThan(rule + ON_FINE_GRID);
+    },
+  );
 });

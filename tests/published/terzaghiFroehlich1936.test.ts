@@ -30,7 +30,11 @@ const DEGREES: readonly (readonly [number, number, number])[] = [
 const CV = 0.7;
 const THICKNESS = 4;
 const yearsOf = (timeFactor: number) => (timeFactor * THICKNESS * THICKNESS) / CV;
-const halfClosed = { linear: [{ thickness: THICKNESS, cv: CV }], base: 'closed', horizon: yearsOf(1.5) } as const;
+const halfClosed = {
+  linear: [{ thickness: THICKNESS, cv: CV }],
+  base: 'closed',
+  horizon: yearsOf(1.5),
+} as const;
 
 describe('Terzaghi & Fröhlich 1936, nothing at the drained face', () => {
   const { degreeAt } = linearConsolidation({ ...halfClosed, shape: (z) => z / THICKNESS });

@@ -54,7 +54,11 @@ describe('question page, spacing of drains', () => {
   });
 
   it('vertical flow alone has then come to 0.3192', () => {
-    const { degreeAt } = linearConsolidation({ linear: [{ thickness: 5, cv: 1 }], base: 'closed', horizon: 2 });
+    const { degreeAt } = linearConsolidation({
+      linear: [{ thickness: 5, cv: 1 }],
+      base: 'closed',
+      horizon: 2,
+    });
     expect(Math.abs(degreeAt(2) - 0.3192)).toBeLessThan(ON_FINE_GRID);
   });
 });

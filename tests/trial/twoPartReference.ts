@@ -57,7 +57,9 @@ const INVERSE_FACTORIALS: readonly Two[] = (() => {
 /** ln 2 and ln 10 and π/2 by their first digits: rounded parts of the printed decimals. */
 const LN_2: Two = [0.6931471805599453, 2.3190468138462996e-17];
 const LN_10: Two = [2.302585092994046, -2.1707562233822494e-16];
-const HALF_PI: readonly [number, number, number] = [1.5707963267948966, 6.123233995736766e-17, -1.4973849048591698e-33];
+const HALF_PI: readonly [number, number, number] = [
+  1.5707963267948966, 6.123233995736766e-17, -1.4973849048591698e-33,
+];
 
 /** e^x; |x| < 745, and a result below 1e-290 loses digits of its second part. */
 export function expTwo(x: Two): Two {

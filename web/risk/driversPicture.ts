@@ -5,6 +5,7 @@ import type { DataTable } from '../chart/dataTable.ts';
 import { fileNameOf } from '../chart/saveFile.ts';
 import { capital } from '../words/findingText.ts';
 import { numberText } from '../words/numberText.ts';
+import { plainSymbols } from '../words/symbolPieces.ts';
 
 /** How the weight of an input is measured. */
 export type DriverMeasure = 'rankCorrelation' | 'rankRegression' | 'firstOrderShare';
@@ -29,7 +30,10 @@ export function driversPicture(
     axisTitle: AXIS_TITLES[by],
     from: share ? Math.min(0, ...shown.map((driver) => driver[by])) : -1,
     to: 1,
-    bars: shown.map((driver) => ({ label: model.inputs[driver.input].label, value: driver[by] })),
+    bars: shown.map((driver) => ({
+      label: plainSymbols(model.inputs[driver.input].label),
+      value: driver[by],
+    })),
   };
 }
 
@@ -49,7 +53,7 @@ export function driversTable({ quantity, drivers }: QuantitySummary, model: Mode
       weight('share of the variance', 'first_order_share'),
     ],
     rows: sortedDrivers(drivers, 'rankCorrelation').map((driver) => [
-      model.inputs[driver.input].label,
+      plainSymbols(model.inputs[driver.input].label),
       driver.rankCorrelation,
       driver.rankRegression,
       driver.firstOrderShare,
@@ -65,7 +69,8 @@ export function driversFinding(
 ): string {
   const [first, second] = sortedDrivers(drivers, by);
   if (!first) return `No uncertain input drives ${quantity.label}.`;
-  const name = capital(model.inputs[first.input].label);
+  const label = model.inputs[first.input].label;
+  const name = plainSymbols(label) === label ? capital(label) : label;
   const size = numberText(first[by], 2);
   const weight = {
     rankCorrelation: `rank correlation ${size}`,

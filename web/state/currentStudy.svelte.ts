@@ -1,6 +1,7 @@
 import type { Model } from '../../engine/project/model.ts';
 import type { Summary } from '../../engine/summary/summary.ts';
-import { startBrowserStudy, type StudyProgress } from './startBrowserStudy.ts';
+import type { StudyProgress } from '../../workers/protocol.ts';
+import { replicatesOf, startBrowserStudy } from './startBrowserStudy.ts';
 
 /** How the study on screen stands. */
 export type StudyState = 'idle' | 'running' | 'done' | 'cancelled' | 'fault';
@@ -26,7 +27,7 @@ export class CurrentStudy {
     const run = this.#run;
     this.state = 'running';
     this.replicatesDone = 0;
-    this.replicates = model.sampling.realisations / 100;
+    this.replicates = replicatesOf(model);
     this.faultSentence = '';
     const study = startBrowserStudy(model, (progress) => {
       if (run === this.#run) this.#take(progress);

@@ -23,5 +23,12 @@ export function symbolPieces(text: string): TextPiece[] {
   return pieces;
 }
 
+/** The same text where nothing can be set as a subscript: 'cv of soft clay'. */
+export function plainSymbols(text: string): string {
+  return symbolPieces(text)
+    .map((piece) => piece.text)
+    .join('');
+}
+
 const SYMBOL =
   /(?<![\p{L}\p{N}_])(?:(\p{L}['′]?)_([\p{L}\p{N}]{1,3})|(C|c|σ['′]|σ|γ)(c|r|s|k|α|v|h|p|v0|z|w))(?![\p{L}\p{N}_])/gu;

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import fc from 'fast-check';
 import { cells } from '../../../engine/ground/cells.ts';
 
-const bothDrained = { topDrained: true, baseDrained: true };
+const BASE_DRAINED = true;
 
 /** Layers of the given thicknesses. */
 function layersOf(thicknesses: readonly number[]) {
@@ -24,7 +24,7 @@ describe('the cells of a column', () => {
         (layers, cut) => {
           const made = layersOf(layers.map(([of]) => of));
           const free = layers.map(([, isFree]) => isFree);
-          const column = cells(made, free, [cut], 60, bothDrained);
+          const column = cells(made, free, [cut], 60, BASE_DRAINED);
           const { top, middle, thickness: of } = column;
           let depth = 0;
           top.forEach((upper, i) => {
@@ -47,7 +47,7 @@ describe('the cells of a column', () => {
 
   it('lie in the layer that they are said to lie in', () => {
     const made = layersOf([2, 3, 0.2, 4]);
-    const { middle, part } = cells(made, [true, false, true, false], [], 60, bothDrained);
+    const { middle, part } = cells(made, [true, false, true, false], [], 60, BASE_DRAINED);
     middle.forEach((z, i) => {
       expect(z).toBeGreaterThan(made[part[i]].top);
       expect(z).toBeLessThan(made[part[i]].base);
@@ -55,13 +55,13 @@ describe('the cells of a column', () => {
   });
 
   it('are thinnest at a drained face and even towards a closed one', () => {
-    const { thickness } = cells(layersOf([10]), [false], [], 60, { topDrained: true, baseDrained: false });
+    const { thickness } = cells(layersOf([10]), [false], [], 60, !BASE_DRAINED);
     for (let i = 1; i < thickness.length; i += 1) expect(thickness[i]).toBeGreaterThan(thickness[i - 1]);
     expect(thickness[0]).toBeLessThan(0.3 * (10 / thickness.length));
   });
 
   it('are refused when fewer than 8 are aimed at', () => {
-    expect(() => cells(layersOf([1]), [false], [], 7, bothDrained)).toThrow(RangeError);
-    expect(() => cells(layersOf([1]), [false], [], NaN, bothDrained)).toThrow(RangeError);
+    expect(() => cells(layersOf([1]), [false], [], 7, BASE_DRAINED)).toThrow(RangeError);
+    expect(() => cells(layersOf([1]), [false], [], NaN, BASE_DRAINED)).toThrow(RangeError);
   });
 });

@@ -22,7 +22,10 @@ const law: CompressionLaw = {
 describe('the compression law', () => {
   it('runs on Cr up to σ′p and on Cc from there on', () => {
     expect(firstLoadingStrain(law, 0, 60)).toBeCloseTo(0.02 * Math.log10(60 / 40), 14);
-    expect(firstLoadingStrain(law, 0, 200)).toBeCloseTo(0.02 * Math.log10(2) + 0.2 * Math.log10(200 / 80), 14);
+    expect(firstLoadingStrain(law, 0, 200)).toBeCloseTo(
+      0.02 * Math.log10(2) + 0.2 * Math.log10(200 / 80),
+      14,
+    );
   });
 
   it('unloads on Cs from the largest stress so far', () => {
@@ -49,7 +52,9 @@ describe('the compression law', () => {
       const h = 1e-5;
       const rising = (at: number) => strainAt(law, 0, at, Math.max(largest, largest < stress ? at : largest));
       const slope = (rising(stress + h) - rising(stress - h)) / (2 * h);
-      expect(compressibilityAt(law, 0, stress, Math.min(largest, largest < stress ? 0 : largest))).toBeCloseTo(slope, 8);
+      expect(
+        compressibilityAt(law, 0, stress, Math.min(largest, largest < stress ? 0 : largest)),
+      ).toBeCloseTo(slope, 8);
     }
   });
 

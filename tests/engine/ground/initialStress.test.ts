@@ -13,14 +13,18 @@ describe('the initial effective stress', () => {
   it('is the weight above less the hydrostatic pressure below the water level', () => {
     const water = { depth: 1, baseExcessHead: 0 };
     expect(initialEffectiveStress(0.5, layers, unitWeights, water)).toBeCloseTo(9, 12);
-    expect(initialEffectiveStress(6, layers, unitWeights, water)).toBeCloseTo(2 * 18 + 4 * 15 - 5 * WATER, 12);
+    expect(initialEffectiveStress(6, layers, unitWeights, water)).toBeCloseTo(
+      2 * 18 + 4 * 15 - 5 * WATER,
+      12,
+    );
   });
 
   it('loses an excess head at the base in proportion to the depth below the water level', () => {
     const still = { depth: 1, baseExcessHead: 0 };
     const artesian = { depth: 1, baseExcessHead: 1.5 };
     const lost = (z: number) =>
-      initialEffectiveStress(z, layers, unitWeights, still) - initialEffectiveStress(z, layers, unitWeights, artesian);
+      initialEffectiveStress(z, layers, unitWeights, still) -
+      initialEffectiveStress(z, layers, unitWeights, artesian);
     expect(lost(1)).toBe(0);
     expect(lost(5.5)).toBeCloseTo(0.75 * WATER, 12);
     expect(lost(10)).toBeCloseTo(1.5 * WATER, 12);
@@ -32,7 +36,8 @@ describe('the initial effective stress', () => {
   });
 
   it('does not depend on how deep the water stands above the ground', () => {
-    const at = (height: number) => initialEffectiveStress(4, layers, unitWeights, { depth: -height, baseExcessHead: 0 });
+    const at = (height: number) =>
+      initialEffectiveStress(4, layers, unitWeights, { depth: -height, baseExcessHead: 0 });
     expect(at(3)).toBeCloseTo(at(0), 10);
   });
 

@@ -9,8 +9,8 @@ import { intervalsOf } from '../../../engine/settlement/timeGrid.ts';
 import type { Track } from '../../../engine/settlement/track.ts';
 import { plainModel, type Plain } from './plainModel.ts';
 
-/** Cells eight and steps sixteen times those of everyday work. */
-export const FINE: Resolution = { cells: 8 * WORKING_RESOLUTION.cells, steps: 16 * WORKING_RESOLUTION.steps };
+/** Eight times the cells and steps of everyday work. */
+export const FINE: Resolution = { cells: 8 * WORKING_RESOLUTION.cells, steps: 8 * WORKING_RESOLUTION.steps };
 
 /** What the engine gives for one column: its track, and the settlement at any date. */
 export interface Marched {
@@ -46,7 +46,8 @@ export function endOfPrimary(plain: Plain, resolution: Resolution = FINE): numbe
     let [sum, whole] = [0, 0];
     column.cells.thickness.forEach((thickness, i) => {
       if (column.free[i] === 1) return;
-      sum += thickness * track.final.pore[i];
+      // u = σ′v0 + Δσ − σ′
+      sum += thickness * (column.law.initialStress[i] + column.loads[0].stress[i] - track.final.stress[i]);
       whole += thickness * column.loads[0].stress[i];
     });
     return sum / whole;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { clampSentences } from '../../../web/risk/clampSentences.ts';
+import { clampSentences } from '../../../web/words/clampSentences.ts';
 import { inventedSummary } from '../invented/inventedSummary.ts';
 
 describe('what the engine had to clamp', () => {

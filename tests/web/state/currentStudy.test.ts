@@ -8,6 +8,7 @@ const started: { report: (progress: unknown) => void; end: (end: unknown) => voi
   [];
 
 vi.mock('../../../web/state/startBrowserStudy.ts', () => ({
+  replicatesOf: () => 10,
   startBrowserStudy: (_model: unknown, report: (progress: unknown) => void) => {
     let end: (value: unknown) => void = () => undefined;
     const result = new Promise((resolve) => (end = resolve));

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { symbolPieces } from '../../../web/words/symbolPieces.ts';
+import { plainSymbols, symbolPieces } from '../../../web/words/symbolPieces.ts';
 
 const marked = (text: string) =>
   symbolPieces(text)
@@ -25,5 +25,9 @@ describe('the symbols in a text', () => {
       ).toBe(text);
       expect(symbolPieces(text).every((piece) => piece.kind === 'plain')).toBe(true);
     }
+  });
+
+  it('are joined where no subscript can be set', () => {
+    expect(plainSymbols('c_v of soft clay, σ′_p')).toBe('cv of soft clay, σ′p');
   });
 });

@@ -1,7 +1,7 @@
-import type { Summary } from '../../engine/summary/summary.ts';
-import { numberText } from '../words/numberText.ts';
+import { numberText } from './numberText.ts';
 
-type Counts = Summary['counts'];
+/** How often each happened, by the names of the engine's counts. */
+type Counts = Readonly<Record<keyof typeof SENTENCES, number>>;
 
 /** One sentence for everything that physics made the engine clamp or leave its law, with how often; none for what never happened. */
 export function clampSentences(counts: Counts, realisations: number): string[] {
@@ -15,8 +15,8 @@ export function clampSentences(counts: Counts, realisations: number): string[] {
     });
 }
 
-/** Each count of the engine has its sentence; the type asks for a new one when a count is added. */
-const SENTENCES: Readonly<Record<keyof Counts, string>> = {
+/** Each count of the engine has its sentence; a caller's type check asks for one when a count is added. */
+const SENTENCES = {
   preconsolidationRaised: 'σ′_p lay below σ′_v0 in a cell and was raised to it',
   recompressionSetToCompression: 'C_r was drawn above C_c and set equal to it',
   cutAtLimits: 'Drawn values were cut at the limits of their marginals',

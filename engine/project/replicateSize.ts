@@ -1,0 +1,2 @@
+/** Realisations in a replicate: the strata of its Latin hypercube. */
+export const REALISATIONS_IN_REPLICATE = 100;

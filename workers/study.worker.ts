@@ -1,0 +1,4 @@
+import { expose } from 'comlink';
+import { studyService } from './studyService.ts';
+
+expose(studyService());
