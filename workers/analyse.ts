@@ -1,37 +1,20 @@
-import { readFileSync } from 'node:fs';
-import { checkProject } from '../engine/project/checkProject.ts';
-import { faultSentence } from '../engine/project/fault.ts';
-import type { Model } from '../engine/project/model.ts';
 import { REALISATIONS_IN_REPLICATE } from '../engine/project/replicateSize.ts';
 import type { Realisations } from '../engine/settlement/realisations.ts';
 import { ENGINE_VERSION } from '../engine/summary/engineVersion.ts';
 import type { Summary } from '../engine/summary/summary.ts';
 import { HELP, readCommandLine, type Command } from './commandLine.ts';
-import { exceedanceCsv, realisationsCsv, settlementWithTimeCsv } from './csvFiles.ts';
+import type { StudyRequest } from './conductStudy.ts';
+import { CALLED_WRONGLY, DONE, Ending, NOT_FINISHED, REFUSED } from './ending.ts';
+import { listenForInterruption } from './interruption.ts';
 import { joinReplicates } from './joinReplicates.ts';
 import { nodeWorkers, usualNodeWorkers } from './nodeWorkers.ts';
-import { outputFault, outputFolder } from './outputFolder.ts';
+import { outputFault } from './outputFolder.ts';
+import { printable } from './printable.ts';
 import { printedSummary } from './printedSummary.ts';
 import { progressLine } from './progressLine.ts';
-import { writtenReplicates } from './replicateFile.ts';
-import { summariseAll } from './summariseAll.ts';
-import { summaryFile } from './summaryFile.ts';
+import { checkedModel, readProject } from './readProject.ts';
 import { WorkerPool } from './workerPool.ts';
-
-/** How the command ends. */
-const DONE = 0;
-const REFUSED = 1;
-const CALLED_WRONGLY = 2;
-const INTERRUPTED = 130;
-
-/** A reason to end that has been put in words. */
-class Ending extends Error {
-  readonly code: number;
-  constructor(code: number, sentence: string) {
-    super(sentence);
-    this.code = code;
-  }
-}
+import { writeResults } from './writeResults.ts';
 
 // a reader that goes away, such as `head`, is no fault
 for (const stream of [process.stdout, process.stderr]) {
@@ -39,169 +22,87 @@ for (const stream of [process.stdout, process.stderr]) {
     if (error.code !== 'EPIPE') throw error;
   });
 }
-
+const interruption = listenForInterruption();
 process.exitCode = await main(process.argv.slice(2));
 
 async function main(words: readonly string[]): Promise<number> {
   const command = readCommandLine(words);
   try {
-    switch (command.kind) {
-      case 'help':
-        process.stdout.write(HELP);
-        return DONE;
-      case 'wrong':
-        throw new Ending(CALLED_WRONGLY, `${command.sentence}; see --help`);
-      case 'join':
-        return join(command);
-      case 'analyse':
-        return await analyse(command);
+    if (command.kind === 'help') process.stdout.write(HELP);
+    else if (command.kind === 'wrong') throw new Ending(CALLED_WRONGLY, `${command.sentence}; see --help.`);
+    else {
+      const fault = outputFault(command.out);
+      if (fault !== null) throw new Ending(CALLED_WRONGLY, `${fault}.`);
+      const summary = await (command.kind === 'join' ? join(command) : analyse(command));
+      if (!command.quiet) process.stdout.write(printable(printedSummary(summary)));
     }
+    return DONE;
   } catch (error) {
-    if (!(error instanceof Ending)) throw error;
-    process.stderr.write(`${error.message}\n`);
-    return error.code;
+    const ending =
+      error instanceof Ending ? error : new Ending(NOT_FINISHED, `Not finished: ${String(error)}`);
+    process.stderr.write(printable(`${ending.message}\n`));
+    return ending.code;
   }
 }
 
-async function analyse(command: Extract<Command, { kind: 'analyse' }>): Promise<number> {
-  const fault = outputFault(command.out);
-  if (fault !== null) throw new Ending(CALLED_WRONGLY, fault);
-  const text = readProject(command.project);
-  const model = withSampling(checkedModel(text), command.realisations, command.seed);
+async function analyse(command: Extract<Command, { kind: 'analyse' }>): Promise<Summary> {
+  const text = await readProject(command.project, interruption);
+  const model = checkedModel(text, command);
   const all = model.sampling.realisations / REALISATIONS_IN_REPLICATE;
   const [first, last] = command.replicates ?? [0, all - 1];
   if (last >= all) {
-    throw new Ending(
-      CALLED_WRONGLY,
-      `the study has ${all} replicates, 0 to ${all - 1}; asked for ${first}-${last}`,
-    );
+    const asked = `replicates ${first} to ${last} were asked for`;
+    throw new Ending(CALLED_WRONGLY, `The study has ${all} replicates, 0 to ${all - 1}; ${asked}.`);
   }
+  const replicates = Array.from({ length: last - first + 1 }, (_, i) => first + i);
   const isPart = command.replicates !== null;
-  const kept: Realisations[] | null = isPart || command.everyRealisation ? [] : null;
-  const summary = await study(model, first, last, command, kept);
-  if (summary === null) return INTERRUPTED;
-  writeResults(command.out, summary, isPart || command.everyRealisation ? kept : null, isPart ? text : null);
-  if (!command.quiet) process.stdout.write(printedSummary(summary));
-  return DONE;
+  const kept = new Map<number, Realisations>();
+  const keep = (realisations: Realisations) => {
+    // a copy, because the original goes on to the worker that pools
+    kept.set(realisations.replicate, structuredClone(realisations));
+  };
+  const request = isPart || command.everyRealisation ? { onReplicate: keep } : {};
+  const size = command.workers ?? usualNodeWorkers();
+  const summary = await study({ model, replicates, ...request }, size, command.quiet);
+  const every = kept.size > 0 ? replicates.map((replicate) => kept.get(replicate)!) : null;
+  await writeResults(command.out, { summary, every, toJoin: isPart ? text : null }, interruption);
+  return summary;
 }
 
-/** Runs the replicates; null when interrupted. */
-async function study(
-  model: Model,
-  first: number,
-  last: number,
-  command: Extract<Command, { kind: 'analyse' }>,
-  kept: Realisations[] | null,
-): Promise<Summary | null> {
-  const pool = new WorkerPool(
-    nodeWorkers(new URL('./study.node.mjs', import.meta.url)),
-    command.workers ?? usualNodeWorkers(),
-  );
-  const line = progressLine(model, command.quiet ? null : process.stderr);
-  const run = pool.start({
-    model,
-    replicates: Array.from({ length: last - first + 1 }, (_, i) => first + i),
-    onTheWay: line.wantsChances ? 'chances' : 'nothing',
-    onProgress: line.show,
-    // a copy, because the original goes on to the worker that pools
-    ...(kept === null
-      ? {}
-      : { onReplicate: (realisations: Realisations) => kept.push(structuredClone(realisations)) }),
-  });
-  const interrupt = () => run.cancel();
-  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.on(signal, interrupt);
+async function join(command: Extract<Command, { kind: 'join' }>): Promise<Summary> {
+  const joined = joinReplicates(command.folders, command.out);
+  if (typeof joined === 'string') throw new Ending(REFUSED, `${joined}.`);
+  if (joined.engineVersion !== ENGINE_VERSION) {
+    const versions = `engine ${joined.engineVersion}; this is ${ENGINE_VERSION}`;
+    throw new Ending(REFUSED, `The runs were made by ${versions}.`);
+  }
+  const model = checkedModel(joined.project, joined);
+  if (model.digest !== joined.digest) {
+    throw new Ending(REFUSED, 'The runs do not belong to the project that they hold.');
+  }
+  const replicates = joined.replicates.map(({ replicate }) => replicate);
+  const given = new Map(joined.replicates.map((each) => [each.replicate, each]));
+  const summary = await study({ model, replicates, given }, 1, command.quiet);
+  const every = command.everyRealisation ? joined.replicates : null;
+  await writeResults(command.out, { summary, every, toJoin: null }, interruption);
+  return summary;
+}
+
+/**
+ * Runs a study on worker threads.
+ *
+ * @throws Ending when it was interrupted or could not be finished
+ */
+async function study(request: StudyRequest, size: number, isQuiet: boolean): Promise<Summary> {
+  const pool = new WorkerPool(nodeWorkers(new URL('./study.node.mjs', import.meta.url)), size);
+  const line = progressLine(request.model, isQuiet ? null : process.stderr);
+  const onTheWay = line.wantsChances ? 'chances' : 'nothing';
+  const run = pool.start({ ...request, onTheWay, onProgress: line.show });
+  interruption.onInterrupt = run.cancel;
   const end = await run.end;
   pool.dispose();
   line.clear();
-  if (end.kind === 'fault') throw new Error(end.message);
-  return end.kind === 'done' ? end.summary : null;
-}
-
-function join(command: Extract<Command, { kind: 'join' }>): number {
-  const fault = outputFault(command.out);
-  if (fault !== null) throw new Ending(CALLED_WRONGLY, fault);
-  const joined = joinReplicates(command.folders);
-  if (typeof joined === 'string') throw new Ending(REFUSED, joined);
-  const model = withSampling(checkedModel(joined.project), joined.realisations, joined.seed);
-  if (model.digest !== joined.digest || joined.engineVersion !== ENGINE_VERSION) {
-    throw new Ending(
-      REFUSED,
-      `the runs were made by engine ${joined.engineVersion}; this is ${ENGINE_VERSION}`,
-    );
-  }
-  const summary = summariseAll(model, joined.replicates);
-  writeResults(command.out, summary, joined.replicates, null);
-  if (!command.quiet) process.stdout.write(printedSummary(summary));
-  return DONE;
-}
-
-function readProject(path: string): string {
-  try {
-    return readFileSync(path === '-' ? 0 : path, 'utf8');
-  } catch (error) {
-    const { code } = error as NodeJS.ErrnoException;
-    const why =
-      code === 'ENOENT'
-        ? 'there is no such file'
-        : code === 'EISDIR'
-          ? 'that is a folder'
-          : 'it cannot be read';
-    throw new Ending(REFUSED, `${path === '-' ? 'standard input' : path}: ${why}`);
-  }
-}
-
-function checkedModel(text: string): Model {
-  const checked = checkProject(text);
-  if (checked.ok) return checked.model;
-  const count = checked.faults.length;
-  const lines = checked.faults.map(
-    (each) => `  ${faultSentence(each)}${each.pointer === '' ? '' : ` [${each.pointer}]`}`,
-  );
-  throw new Ending(
-    REFUSED,
-    [`The project was refused: ${count === 1 ? 'one fault' : `${count} faults`}.`, ...lines].join('\n'),
-  );
-}
-
-function withSampling(model: Model, realisations: number | null, seed: number | null): Model {
-  return {
-    ...model,
-    sampling: {
-      realisations: realisations ?? model.sampling.realisations,
-      seed: seed ?? model.sampling.seed,
-    },
-  };
-}
-
-/** Writes all files, or none. */
-function writeResults(
-  out: string,
-  summary: Summary,
-  every: readonly Realisations[] | null,
-  partOfProject: string | null,
-): void {
-  const { model } = summary;
-  const folder = outputFolder(out);
-  try {
-    folder.write('summary.json', [summaryFile(summary)]);
-    folder.write('exceedance.csv', [exceedanceCsv(summary)]);
-    folder.write('settlement-with-time.csv', [settlementWithTimeCsv(summary)]);
-    if (every !== null) folder.write('realisations.csv', realisationsCsv(model, every));
-    if (every !== null && partOfProject !== null) {
-      const file = {
-        format: 'slow-ground-replicates',
-        engineVersion: ENGINE_VERSION,
-        digest: model.digest,
-        seed: model.sampling.seed,
-        realisations: model.sampling.realisations,
-        project: partOfProject,
-        replicates: [...every].sort((a, b) => a.replicate - b.replicate),
-      } as const;
-      folder.write('replicates.bin', writtenReplicates(file));
-    }
-    folder.publish();
-  } catch (error) {
-    folder.discard();
-    throw new Ending(REFUSED, `the results could not be written to ${out}: ${(error as Error).message}`);
-  }
+  await interruption.check();
+  if (end.kind === 'done') return end.summary;
+  throw new Ending(NOT_FINISHED, `Not finished: ${end.kind === 'fault' ? end.message : end.kind}`);
 }

@@ -18,6 +18,7 @@ export type Command =
       readonly kind: 'join';
       readonly folders: readonly string[];
       readonly out: string;
+      readonly everyRealisation: boolean;
       readonly quiet: boolean;
     }
   /** Called wrongly, with what is right. */
@@ -38,7 +39,8 @@ export const HELP = `Slow Ground: chances of settlement of an embankment, from a
   --quiet               prints nothing but faults
   --help                this text
 
-Ends with 0 when done, 1 when the input was refused, 2 when called wrongly, 130 when interrupted.
+Ends with 0 when done, 1 when the input was refused, 2 when called wrongly, 130 when interrupted, and 3 when
+something else stood in the way, such as a full disk. The folder is written whole or not at all.
 `;
 
 const FLAGS = ['--every-realisation', '--quiet', '--help', '--join'] as const;
@@ -64,14 +66,13 @@ export function readCommandLine(words: readonly string[]): Command {
   const out = values.get('--out');
   if (out === undefined || out === '') return wrong('--out is missing');
   const quiet = flags.has('--quiet');
+  const everyRealisation = flags.has('--every-realisation');
   if (flags.has('--join')) {
     const needless = [...values.keys()].find((key) => key !== '--out');
-    if (needless !== undefined || flags.has('--every-realisation')) {
-      return wrong(`${needless ?? '--every-realisation'} does not go with --join`);
-    }
+    if (needless !== undefined) return wrong(`${needless} does not go with --join`);
     return paths.length === 0
       ? wrong('--join needs the folders to join')
-      : { kind: 'join', folders: paths, out, quiet };
+      : { kind: 'join', folders: paths, out, everyRealisation, quiet };
   }
   if (paths.length !== 1)
     return wrong(paths.length === 0 ? 'the project file is missing' : 'more than one project file');
@@ -91,7 +92,6 @@ export function readCommandLine(words: readonly string[]): Command {
   if (workers !== null && !(workers <= 256)) return wrong('--workers needs a whole number from 1 to 256');
   const replicates = readRange(values.get('--replicates'));
   if (typeof replicates === 'string') return wrong(replicates);
-  const everyRealisation = flags.has('--every-realisation');
   return {
     kind: 'analyse',
     project: paths[0],

@@ -1,5 +1,5 @@
 import { readFileSync } from 'node:fs';
-import { join } from 'node:path';
+import { join, resolve } from 'node:path';
 import { REALISATIONS_IN_REPLICATE } from '../engine/project/replicateSize.ts';
 import { readReplicates, type ReplicateFile } from './replicateFile.ts';
 
@@ -7,9 +7,12 @@ import { readReplicates, type ReplicateFile } from './replicateFile.ts';
  * Reads runs over ranges of replicates and puts them together.
  *
  * @param folders that the runs wrote, in any order
+ * @param out where the result is to go, which must not be one of them
  * @returns all replicates of the study, or one sentence that says why they do not join
  */
-export function joinReplicates(folders: readonly string[]): ReplicateFile | string {
+export function joinReplicates(folders: readonly string[], out: string): ReplicateFile | string {
+  if (folders.some((folder) => resolve(folder) === resolve(out)))
+    return `${out} is one of the runs to join; name another folder for the result`;
   const files: ReplicateFile[] = [];
   for (const folder of folders) {
     const file = readFolder(folder);

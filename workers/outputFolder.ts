@@ -1,11 +1,16 @@
 import {
-  mkdtempSync,
+  accessSync,
   closeSync,
+  constants,
   existsSync,
+  mkdirSync,
+  mkdtempSync,
   openSync,
   readdirSync,
+  realpathSync,
   renameSync,
   rmSync,
+  statSync,
   writeSync,
 } from 'node:fs';
 import { basename, dirname, join, resolve } from 'node:path';
@@ -15,57 +20,75 @@ const OURS = /^(summary\.json|exceedance\.csv|settlement-with-time\.csv|realisat
 
 /** A folder of results that appears whole or not at all. */
 export interface OutputFolder {
-  /** Writes a file piece by piece. */
-  readonly write: (name: string, pieces: Iterable<string | Uint8Array>) => void;
+  /** Writes a piece at the end of a file. */
+  readonly write: (name: string, piece: string | Uint8Array) => void;
   /** Puts the folder in its place. */
   readonly publish: () => void;
   /** Takes away what was written so far. */
   readonly discard: () => void;
 }
 
-/** Why results cannot be written to a path; null when they can. */
+/** Why results cannot be written to a path, in one sentence; null when they can. */
 export function outputFault(out: string): string | null {
-  const target = resolve(out);
   try {
+    const target = placeOf(out);
     if (existsSync(target)) {
       const strange = readdirSync(target).find((name) => !OURS.test(name));
       if (strange !== undefined)
         return `${out} holds ${strange}, which this command did not write; name another folder`;
-    } else if (!existsSync(dirname(target))) return `the folder that ${out} is to be made in does not exist`;
+      if (statSync(target).dev !== statSync(dirname(target)).dev || target === dirname(target))
+        return `${out} is where a disk begins and cannot be replaced; name a folder inside it`;
+    }
+    const above = nearestFolderAbove(target);
+    if (!statSync(above).isDirectory()) return `${above} is not a folder, so ${out} cannot be made in it`;
+    accessSync(above, constants.W_OK | constants.X_OK);
     return null;
   } catch {
     return `${out} cannot be used as a folder of results`;
   }
 }
 
-/** Starts a folder of results beside its place. */
+/** Starts a folder of results, as a hidden draft on the same disk as its place. */
 export function outputFolder(out: string): OutputFolder {
-  const target = resolve(out);
-  const draft = mkdtempSync(join(dirname(target), `.${basename(target)}-`));
-  chmodSync(draft, 0o755);
+  const target = placeOf(out);
+  const shelter = mkdtempSync(join(nearestFolderAbove(target), `.${basename(target)}-`));
+  const [draft, former] = [join(shelter, 'draft'), join(shelter, 'former')];
+  mkdirSync(draft);
+  const discard = () => rmSync(shelter, { recursive: true, force: true });
   return {
-    write(name, pieces) {
-      const file = openSync(join(draft, name), 'w');
+    write(name, piece) {
+      const file = openSync(join(draft, name), 'a');
       try {
-        for (const piece of pieces) writeAll(file, typeof piece === 'string' ? Buffer.from(piece) : piece);
+        writeAll(file, typeof piece === 'string' ? Buffer.from(piece) : piece);
       } finally {
         closeSync(file);
       }
     },
     publish() {
-      if (!existsSync(target)) {
+      mkdirSync(dirname(target), { recursive: true });
+      const replaces = existsSync(target);
+      if (replaces) renameSync(target, former);
+      try {
         renameSync(draft, target);
-        return;
+      } catch (error) {
+        if (replaces) renameSync(former, target);
+        throw error;
       }
-      const before = mkdtempSync(join(dirname(target), `.${basename(target)}-`));
-      renameSync(target, join(before, 'before'));
-      renameSync(draft, target);
-      rmSync(before, { recursive: true, force: true });
+      discard();
     },
-    discard() {
-      rmSync(draft, { recursive: true, force: true });
-    },
+    discard,
   };
+}
+
+/** The full path; of a folder that is there, the one that a link leads to. */
+function placeOf(path: string): string {
+  return existsSync(path) ? realpathSync(path) : resolve(path);
+}
+
+function nearestFolderAbove(target: string): string {
+  let above = dirname(target);
+  while (!existsSync(above) && above !== dirname(above)) above = dirname(above);
+  return above;
 }
 
 function writeAll(file: number, bytes: Uint8Array): void {

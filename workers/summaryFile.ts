@@ -1,20 +1,20 @@
-import type { Estimate, Summary } from '../engine/summary/summary.ts';
+import type { Estimate, QuantitySummary, Summary } from '../engine/summary/summary.ts';
 
 /**
  * The summary as it is written: units in the keys (m, years, m/year, m/m, shares), keys left out where there is
  * no number (a band with fewer than ten replicates behind it, a date that is not reached). Its shape:
  *
  *     { format, version, project, engine_version, model_digest, seed, realisations, replicates,
- *       limits: [{ name, result, place, limit_…, passes_share, passes_share_low, passes_share_high, above, of,
+ *       limits: [{ name, result, place, limit_U, passes_share, passes_share_low, passes_share_high, above, of,
  *                  bound_when_none_share, convergence: [{ realisations, passes_share, half_width_share }] }],
- *       results: [{ id, label, unit, mean, mean_low, mean_high, deviation,
- *                   percentiles: [{ percent, value, low, high }], unresolved_above,
+ *       results: [{ id, label, unit, mean_U, mean_U_low, mean_U_high, deviation_U,
+ *                   percentiles: [{ percent, value_U, value_U_low, value_U_high }], unresolved_above_U,
  *                   drivers: [{ input, rank_correlation, rank_regression, first_order_share }] }],
  *       settlement_with_time: [{ point, times_year, mean_m, percentiles: [{ percent, values_m, low_m, high_m }] }],
  *       central: [{ point, settlement_m }], numerical_error_m, numerical_error_share,
  *       counts, warnings, remarks, fill_placed_m3_per_m, fill_topping_up_m3_per_m }
  *
- * Values of a result are in its `unit`.
+ * U is the unit of the result: m, m_per_year, year or m_per_m. A limit is `limit_U`.
  */
 export function summaryFile(summary: Summary): string {
   const { model, provenance, numericalError } = summary;
@@ -47,26 +47,7 @@ export function summaryFile(summary: Summary): string {
         })),
       };
     }),
-    results: summary.quantities.map(({ quantity, mean, deviation, percentiles, exceedance, drivers }) => ({
-      id: quantity.id,
-      label: quantity.label,
-      unit: quantity.unit,
-      ...estimate('mean', mean),
-      deviation,
-      percentiles: percentiles.map(({ percent, estimate: { value, low, high } }) => ({
-        percent,
-        value,
-        low,
-        high,
-      })),
-      unresolved_above: exceedance.unresolvedAbove,
-      drivers: drivers.map((driver) => ({
-        input: model.inputs[driver.input].name,
-        rank_correlation: driver.rankCorrelation,
-        rank_regression: driver.rankRegression,
-        first_order_share: driver.firstOrderShare,
-      })),
-    })),
+    results: summary.quantities.map(resultEntry(summary)),
     settlement_with_time: summary.timeBands.map(({ point, times, bands, mean }) => ({
       point: points[point],
       times_year: times,
@@ -90,6 +71,31 @@ export function summaryFile(summary: Summary): string {
   const numbersOnly = (_key: string, value: unknown) =>
     typeof value === 'number' && !Number.isFinite(value) ? undefined : value;
   return `${JSON.stringify(file, numbersOnly, 1)}\n`;
+}
+
+/** A result with its unit in every key that holds a value of it. */
+function resultEntry({ model }: Summary): (result: QuantitySummary) => object {
+  return ({ quantity, mean, deviation, percentiles, exceedance, drivers }) => {
+    const unit = unitKey(quantity.unit);
+    return {
+      id: quantity.id,
+      label: quantity.label,
+      unit: quantity.unit,
+      ...estimate(`mean_${unit}`, mean),
+      [`deviation_${unit}`]: deviation,
+      percentiles: percentiles.map((each) => ({
+        percent: each.percent,
+        ...estimate(`value_${unit}`, each.estimate),
+      })),
+      [`unresolved_above_${unit}`]: exceedance.unresolvedAbove,
+      drivers: drivers.map((driver) => ({
+        input: model.inputs[driver.input].name,
+        rank_correlation: driver.rankCorrelation,
+        rank_regression: driver.rankRegression,
+        first_order_share: driver.firstOrderShare,
+      })),
+    };
+  };
 }
 
 function estimate(key: string, { value, low, high }: Estimate): Record<string, number> {

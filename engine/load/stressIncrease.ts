@@ -90,27 +90,37 @@ export function stressIncrease(
   z: number,
 ): number {
   if (wide || !(z > 0)) return across.from < 0 && across.to > 0 ? pressureAt(pieces, x) : 0;
-  const endless = across.from === -Infinity && across.to === Infinity;
+  if (across.from === -Infinity && across.to === Infinity) {
+    let stress = 0;
+    for (const piece of pieces) stress += stripStress(piece, x, z);
+    return stress;
+  }
+  return finiteStress(pieces, across, x, z);
+}
+
+/** Pieces of finite length across the section: each its level and its slope at the point, by its two edges. */
+function finiteStress(pieces: readonly PressurePiece[], across: OutOfPlane, x: number, z: number): number {
   let stress = 0;
-  for (const piece of pieces) {
-    stress += endless ? stripStress(piece, x, z) : finiteStress(piece, across, x, z);
+  let edge = NaN;
+  let [even, sloping] = [0, 0];
+  for (const { x1, q1, x2, q2 } of pieces) {
+    // the right edge of a piece is as a rule the left one of the next
+    if (x1 !== edge)
+      [even, sloping] = [edgeInfluence(x1 - x, across, z), edgeInfluenceOfSlope(x1 - x, across, z)];
+    const [evenLeft, slopingLeft] = [even, sloping];
+    even = edgeInfluence(x2 - x, across, z);
+    sloping = edgeInfluenceOfSlope(x2 - x, across, z);
+    edge = x2;
+    const slope = (q2 - q1) / (x2 - x1);
+    stress += (q1 - slope * (x1 - x)) * (even - evenLeft) + slope * (sloping - slopingLeft);
   }
   return stress;
 }
 
-/** A piece of finite length across the section: its level and its slope at the point, each by four corners. */
-function finiteStress({ x1, q1, x2, q2 }: PressurePiece, across: OutOfPlane, x: number, z: number): number {
-  const slope = (q2 - q1) / (x2 - x1);
-  const level = q1 - slope * (x1 - x);
-  const even = level * rectangleInfluence(x1, x2, across, x, z);
-  if (slope === 0) return even;
-  const [right, left] = [x2 - x, x1 - x];
-  return (
-    even +
-    slope *
-      (cornerInfluenceOfSlope(right, across.to, z) -
-        cornerInfluenceOfSlope(left, across.to, z) -
-        cornerInfluenceOfSlope(right, across.from, z) +
-        cornerInfluenceOfSlope(left, across.from, z))
-  );
+function edgeInfluence(a: number, across: OutOfPlane, z: number): number {
+  return cornerInfluence(a, across.to, z) - cornerInfluence(a, across.from, z);
+}
+
+function edgeInfluenceOfSlope(a: number, across: OutOfPlane, z: number): number {
+  return cornerInfluenceOfSlope(a, across.to, z) - cornerInfluenceOfSlope(a, across.from, z);
 }

@@ -1,4 +1,9 @@
-import { betaWeight, inverseIncompleteBeta, regularisedIncompleteBeta } from './incompleteBeta.ts';
+import {
+  betaWeight,
+  inverseIncompleteBeta,
+  regularisedIncompleteBeta,
+  weightScale,
+} from './incompleteBeta.ts';
 
 /** Beta distribution between two limits. */
 export interface Beta {
@@ -58,7 +63,7 @@ export function betaDensity({ low, high, alpha, beta }: Beta, x: number): number
   const share = (x - low) / (high - low);
   const left = (high - x) / (high - low);
   if (!(share > 0 && left > 0)) return 0;
-  return betaWeight(share, left, alpha, beta) / (share * left * (high - low));
+  return betaWeight(share, left, alpha, beta, weightScale(alpha, beta)) / (share * left * (high - low));
 }
 
 export function betaMoments({ low, high, alpha, beta }: Beta): {

@@ -16,7 +16,8 @@ export function regularisedIncompleteBeta(x: number, a: number, b: number): numb
   refuseShapes('regularisedIncompleteBeta', a, b);
   if (!(x >= 0 && x <= 1)) throw new RangeError(`regularisedIncompleteBeta: x must be from 0 to 1, got ${x}`);
   if (x === 0 || x === 1) return x;
-  return x <= turningPoint(a, b) ? lowerShare(x, 1 - x, a, b) : 1 - lowerShare(1 - x, x, b, a);
+  const scale = weightScale(a, b);
+  return x <= turningPoint(a, b) ? lowerShare(x, 1 - x, a, b, scale) : 1 - lowerShare(1 - x, x, b, a, scale);
 }
 
 /**
@@ -37,11 +38,13 @@ export function inverseWithComplement(p: number, a: number, b: number): readonly
   if (!(p >= 0 && p <= 1)) throw new RangeError(`inverseIncompleteBeta: p must be from 0 to 1, got ${p}`);
   if (p === 0 || p === 1) return [p, 1 - p];
   const turn = turningPoint(a, b);
-  if (p <= lowerShare(turn, 1 - turn, a, b)) {
-    const x = solvedFromBelow(p, a, b);
+  const scale = weightScale(a, b);
+  const atTurn = lowerShare(turn, 1 - turn, a, b, scale);
+  if (p <= atTurn) {
+    const x = solvedFromBelow(p, a, b, scale, turn, atTurn);
     return [x, 1 - x];
   }
-  const y = solvedFromBelow(1 - p, b, a);
+  const y = solvedFromBelow(1 - p, b, a, scale, 1 - turn, 1 - atTurn);
   return [1 - y, y];
 }
 
@@ -52,11 +55,15 @@ export function inverseWithComplement(p: number, a: number, b: number): readonly
  *
  * @param x between 0 and 1
  * @param y 1 − x
+ * @param scale what does not depend on x, weightScale(a, b)
  */
-export function betaWeight(x: number, y: number, a: number, b: number): number {
-  const sum = a + b;
-  const rest = stirlingRest(sum) - stirlingRest(a) - stirlingRest(b);
-  return exp(rest - deviance(a, sum * x) - deviance(b, sum * y)) * Math.sqrt(((a / sum) * b) / (2 * Math.PI));
+export function betaWeight(x: number, y: number, a: number, b: number, scale: number): number {
+  return scale * exp(-deviance(a, (a + b) * x) - deviance(b, (a + b) * y));
+}
+
+export function weightScale(a: number, b: number): number {
+  const rest = stirlingRest(a + b) - stirlingRest(a) - stirlingRest(b);
+  return exp(rest) * Math.sqrt(((a / (a + b)) * b) / (2 * Math.PI));
 }
 
 /** k ln(k/m) + m − k, by a series where k and m are close. */
@@ -87,8 +94,8 @@ function turningPoint(a: number, b: number): number {
 }
 
 /** I_x(a, b) for x up to the turning point; y is 1 − x. */
-function lowerShare(x: number, y: number, a: number, b: number): number {
-  return (betaWeight(x, y, a, b) / a) * continuedFraction(x, a, b);
+function lowerShare(x: number, y: number, a: number, b: number, scale: number): number {
+  return (betaWeight(x, y, a, b, scale) / a) * continuedFraction(x, a, b);
 }
 
 /** By Lentz's method as in Press et al. (1992), Numerical Recipes, section 6.4. */
@@ -115,16 +122,21 @@ function awayFromZero(value: number): number {
   return Math.abs(value) < SMALLEST ? SMALLEST : value;
 }
 
-/** x up to the turning point with I_x(a, b) = p; d ln I/d ln x = a/((1 − x) · fraction). */
-function solvedFromBelow(p: number, a: number, b: number): number {
-  let low = 0;
-  let high = turningPoint(a, b);
+/** x up to `turn`, where I is `atTurn`, with I_x(a, b) = p; d ln I/d ln x = a/((1 − x) · fraction). */
+function solvedFromBelow(
+  p: number,
+  a: number,
+  b: number,
+  scale: number,
+  turn: number,
+  atTurn: number,
+): number {
+  let [low, high] = [0, turn];
   // I grows about as x^a
-  const atTurn = lowerShare(high, 1 - high, a, b);
-  let x = high * exp(Math.max(-700, (ln(p) - ln(atTurn)) / a));
+  let x = turn * exp(Math.max(-700, ln(p / atTurn) / a));
   for (let step = 0; step < MOST_STEPS; step += 1) {
     const fraction = continuedFraction(x, a, b);
-    const share = (betaWeight(x, 1 - x, a, b) / a) * fraction;
+    const share = (betaWeight(x, 1 - x, a, b, scale) / a) * fraction;
     const change = ((share > 0 ? ln(p / share) : 700) * (1 - x) * fraction) / a;
     // the next step's error is about a times the square of this one
     if (Math.abs(change) < 1e-10) return x + x * change;

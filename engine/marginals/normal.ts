@@ -31,7 +31,7 @@ export function makeNormal(input: {
   return marginal;
 }
 
-/** As seen from the tail that is nearer, so that no probability is rounded to 1: limits in scores, a ≤ −|…|. */
+/** Limits in scores, a below b, seen from the side of the longer lower tail: no probability near 1 loses digits. */
 interface Facing {
   /** 1 as entered, −1 turned about the mean. */
   readonly sign: 1 | -1;

@@ -25,8 +25,8 @@ export function makeTriangular(input: {
 export function triangularQuantile({ low, mode, high }: Triangular, p: number): number {
   const width = high - low;
   return p * width <= mode - low
-    ? low + Math.sqrt(p * width * (mode - low))
-    : high - Math.sqrt((1 - p) * width * (high - mode));
+    ? Math.min(mode, low + Math.sqrt(p * width * (mode - low)))
+    : Math.max(mode, high - Math.sqrt((1 - p) * width * (high - mode)));
 }
 
 export function triangularCumulative({ low, mode, high }: Triangular, x: number): number {

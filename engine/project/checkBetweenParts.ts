@@ -5,17 +5,19 @@ import type { Reading } from './reading.ts';
 
 /** The parts of a model that could be read. */
 export type ReadParts = {
-  readonly [Part in
-    | 'soils'
-    | 'layers'
-    | 'lifts'
-    | 'surfaceLoads'
-    | 'drains'
-    | 'vacuum'
-    | 'boundaries'
-    | 'points'
-    | 'pairs'
-    | 'limits']: Model[Part] | undefined;
+  readonly [
+    Part in
+      | 'soils'
+      | 'layers'
+      | 'lifts'
+      | 'surfaceLoads'
+      | 'drains'
+      | 'vacuum'
+      | 'boundaries'
+      | 'points'
+      | 'pairs'
+      | 'limits'
+  ]: Model[Part] | undefined;
 };
 
 /** Refuses what is right by itself and wrong beside another part; looks at every part that could be read. */
@@ -32,7 +34,11 @@ function refuseStandingOnPlaced(reading: Reading, { lifts }: ReadParts): void {
   lifts?.forEach((lift, i) => {
     if (!lift.standing || lifts.slice(0, i).every((below) => below.standing)) return;
     const place = { pointer: `/fill/lifts/${i}/standing`, path: `lift "${lift.name}", standing` };
-    reading.faults.add(place, 'a standing lift after one that is placed', 'standing lifts first, as the lowest');
+    reading.faults.add(
+      place,
+      'a standing lift after one that is placed',
+      'standing lifts first, as the lowest',
+    );
   });
 }
 
@@ -42,6 +48,10 @@ function refuseSlopeOfStep(reading: Reading, { limits, pairs, points }: ReadPart
     const { first, second, name } = pairs[limit.pair];
     if (points[first].x !== points[second].x) return;
     const place = { pointer: `/limits/${i}/result`, path: `limit "${limit.name}", result` };
-    reading.faults.add(place, `a slope of the pair "${name}", both points of which lie at one x`, 'a differential settlement: a step has no slope');
+    reading.faults.add(
+      place,
+      `a slope of the pair "${name}", both points of which lie at one x`,
+      'a differential settlement: a step has no slope',
+    );
   });
 }

@@ -13,7 +13,13 @@ export function checkDates(
   loads: readonly SurfaceLoad[],
   vacuum: Vacuum | null,
 ): void {
-  const inOrder = (place: Place, what: string, earlier: UncertainNumber, later: UncertainNumber, whose: string) => {
+  const inOrder = (
+    place: Place,
+    what: string,
+    earlier: UncertainNumber,
+    later: UncertainNumber,
+    whose: string,
+  ) => {
     const [start, end] = [centralValue(earlier), centralValue(later)];
     if (end >= start) return;
     reading.faults.add(place, `${what} in ${end}`, `a year not before ${whose}, ${start}`);
@@ -29,13 +35,25 @@ export function checkDates(
     if (removal === null) return;
     inOrder(place('removal/end_year', 'removal'), 'an end', removal.start, removal.end, 'its start');
     if (placing === null) return;
-    inOrder(place('removal/start_year', 'removal'), 'a start', placing.end, removal.start, 'the end of its placing');
+    inOrder(
+      place('removal/start_year', 'removal'),
+      'a start',
+      placing.end,
+      removal.start,
+      'the end of its placing',
+    );
   });
   loads.forEach(({ name, start, end }, i) => {
     const place = { pointer: `/surface_loads/${i}/end_year`, path: `surface load "${name}", end` };
     if (end !== null) inOrder(place, 'an end', start, end, 'its start');
   });
   if (vacuum !== null) {
-    inOrder({ pointer: '/vacuum/end_year', path: 'vacuum, end' }, 'an end', vacuum.start, vacuum.end, 'its start');
+    inOrder(
+      { pointer: '/vacuum/end_year', path: 'vacuum, end' },
+      'an end',
+      vacuum.start,
+      vacuum.end,
+      'its start',
+    );
   }
 }

@@ -38,7 +38,11 @@ export function checkDrainage(reading: Reading, parts: DrainedParts): void {
     reading.faults.add(DRAINS, found, 'a diameter below that of the ground served');
   } else if (!(smeared < influence)) {
     const found = `a smeared zone of ${shortNumber(smeared)} m, each drain serving ${shortNumber(influence)} m of ground`;
-    reading.faults.add(placeWithin(DRAINS, 'smear_ratio', 'smear ratio'), found, 'a smeared zone within the ground served');
+    reading.faults.add(
+      placeWithin(DRAINS, 'smear_ratio', 'smear ratio'),
+      found,
+      'a smeared zone within the ground served',
+    );
   }
   if (soils === undefined || layers === undefined || points === undefined) return;
   const drained = points.filter(({ x, fixed }) => !fixed && x >= drains.from && x <= drains.to);
@@ -70,14 +74,23 @@ export interface CentralLayer {
 export function centralLayers(layers: Model['layers'], x: number): CentralLayer[] {
   let top = 0;
   return layers.map(({ name, soil, thickness }) => {
-    const layer = { name, soil, top, base: top + thicknessAt(thickness, x, centralValue(thicknessNumber(thickness))) };
+    const layer = {
+      name,
+      soil,
+      top,
+      base: top + thicknessAt(thickness, x, centralValue(thicknessNumber(thickness))),
+    };
     top = layer.base;
     return layer;
   });
 }
 
 /** Name of a free-draining layer that is not joined to the top and that drains reach into; null without one. */
-function innerSeamCrossed(layers: readonly CentralLayer[], soils: Model['soils'], drains: Drains): string | null {
+function innerSeamCrossed(
+  layers: readonly CentralLayer[],
+  soils: Model['soils'],
+  drains: Drains,
+): string | null {
   let joinedToTop = true;
   for (const layer of layers) {
     if (!(layer.base - layer.top > 1e-6)) continue;

@@ -29,8 +29,7 @@ import { remarksOf } from './remarksOf.ts';
 
 /** A checked model, or everything that is wrong with the text. */
 export type CheckResult =
-  | { readonly ok: true; readonly model: Model }
-  | { readonly ok: false; readonly faults: readonly Fault[] };
+  { readonly ok: true; readonly model: Model } | { readonly ok: false; readonly faults: readonly Fault[] };
 
 export const PROJECT_KEYS = {
   required: [
@@ -79,7 +78,11 @@ export function checkProject(text: string): CheckResult {
 function readModel(reading: Reading, project: OpenedObject): Omit<Model, 'digest' | 'remarks'> | undefined {
   if (project.entries.has('$schema') && typeof project.entries.get('$schema') !== 'string') {
     const place = { pointer: '/$schema', path: '$schema' };
-    reading.faults.add(place, describeFound(project.entries.get('$schema')), 'the address of the schema as a text');
+    reading.faults.add(
+      place,
+      describeFound(project.entries.get('$schema')),
+      'the address of the schema as a text',
+    );
   }
   const { names: soilNames, soils } = readSoils(reading, project);
   const layers = readLayers(reading, project, soilNames);
@@ -106,11 +109,12 @@ function readModel(reading: Reading, project: OpenedObject): Omit<Model, 'digest
     surfaceLoads,
     drains,
     vacuum,
-    couplings: fill && times && {
-      heldUntil: fill.heldUntil === 'handover' ? times.handover : fill.heldUntil,
-      topUpUnitWeight: fill.topUpUnitWeight,
-      submergence: fill.submergence,
-    },
+    couplings: fill &&
+      times && {
+        heldUntil: fill.heldUntil === 'handover' ? times.handover : fill.heldUntil,
+        topUpUnitWeight: fill.topUpUnitWeight,
+        submergence: fill.submergence,
+      },
     wideFill: fill?.wideFill,
     secondary: readSecondary(reading, project),
     points: points.members,
@@ -125,6 +129,17 @@ function readModel(reading: Reading, project: OpenedObject): Omit<Model, 'digest
     inputs: reading.inputs,
     correlations,
   });
-  checkBetweenParts(reading, { soils: wholeList(soils), layers, lifts: fill?.lifts, surfaceLoads, drains, vacuum, boundaries, points: points.members, pairs: pairs.members, limits });
+  checkBetweenParts(reading, {
+    soils: wholeList(soils),
+    layers,
+    lifts: fill?.lifts,
+    surfaceLoads,
+    drains,
+    vacuum,
+    boundaries,
+    points: points.members,
+    pairs: pairs.members,
+    limits,
+  });
   return model;
 }

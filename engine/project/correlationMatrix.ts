@@ -64,7 +64,7 @@ export function firstBreakingPair(correlations: readonly RankCorrelation[]): num
 /** Those of a list that hang together with one of it, by shared inputs, in the list's order. */
 export function linkedTo(correlations: readonly RankCorrelation[], place: number): RankCorrelation[] {
   const linked = new Set([correlations[place].first, correlations[place].second]);
-  for (let before = 0; before < linked.size; ) {
+  for (let before = 0; before < linked.size;) {
     before = linked.size;
     for (const { first, second } of correlations) {
       if (linked.has(first) || linked.has(second)) linked.add(first).add(second);

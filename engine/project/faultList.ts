@@ -11,7 +11,8 @@ export class FaultList {
 
   add(place: Place, found: string, right: string): void {
     this.count += 1;
-    if (this.count <= MOST_LISTED) this.listed.push({ pointer: place.pointer, path: place.path, found, right });
+    if (this.count <= MOST_LISTED)
+      this.listed.push({ pointer: place.pointer, path: place.path, found, right });
   }
 
   get isEmpty(): boolean {

@@ -17,7 +17,10 @@ const CLOSE_ENOUGH = 1e-10;
  * @param matrix symmetric, its diagonal 1
  * @param least smallest eigenvalue aimed at, 0 for the nearest of all
  */
-export function nearestCorrelationMatrix(matrix: readonly ArrayLike<number>[], least: number): Float64Array[] {
+export function nearestCorrelationMatrix(
+  matrix: readonly ArrayLike<number>[],
+  least: number,
+): Float64Array[] {
   let current = matrix.map((row) => Float64Array.from(row));
   let correction = matrix.map((row) => new Float64Array(row.length));
   for (let round = 0; round < MOST_ROUNDS; round += 1) {
@@ -25,7 +28,9 @@ export function nearestCorrelationMatrix(matrix: readonly ArrayLike<number>[], l
     const lifted = withoutSmallEigenvalues(corrected, least);
     correction = lifted.map((row, i) => row.map((value, j) => value - corrected[i][j]));
     const next = lifted.map((row, i) => row.map((value, j) => (i === j ? 1 : value)));
-    const change = Math.max(...next.map((row, i) => Math.max(...row.map((value, j) => Math.abs(value - current[i][j])))));
+    const change = Math.max(
+      ...next.map((row, i) => Math.max(...row.map((value, j) => Math.abs(value - current[i][j])))),
+    );
     current = next;
     if (change < CLOSE_ENOUGH) break;
   }
@@ -37,7 +42,8 @@ function withoutSmallEigenvalues(matrix: readonly Float64Array[], least: number)
   return matrix.map((row, i) =>
     row.map((_, j) => {
       let sum = 0;
-      for (let k = 0; k < values.length; k += 1) sum += Math.max(values[k], least) * vectors[i][k] * vectors[j][k];
+      for (let k = 0; k < values.length; k += 1)
+        sum += Math.max(values[k], least) * vectors[i][k] * vectors[j][k];
       return sum;
     }),
   );
@@ -60,7 +66,11 @@ export function nearestRankCorrelations(correlations: readonly RankCorrelation[]
   return null;
 }
 
-function roundedRanks(inputs: readonly number[], matrix: readonly Float64Array[], share: number): RankCorrelation[] {
+function roundedRanks(
+  inputs: readonly number[],
+  matrix: readonly Float64Array[],
+  share: number,
+): RankCorrelation[] {
   return inputs.flatMap((first, i) =>
     inputs.slice(i + 1).flatMap((second, ahead) => {
       const rank = Math.round(100 * share * rankCorrelation(matrix[i][i + 1 + ahead])) / 100;

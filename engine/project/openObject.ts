@@ -20,7 +20,12 @@ export interface KnownKeys {
  * Opens a value as an object, with a fault for each missing and each unknown key; undefined where it is no
  * object at all.
  */
-export function openObject(reading: Reading, place: Place, value: unknown, keys: KnownKeys): OpenedObject | undefined {
+export function openObject(
+  reading: Reading,
+  place: Place,
+  value: unknown,
+  keys: KnownKeys,
+): OpenedObject | undefined {
   if (typeof value !== 'object' || value === null || Array.isArray(value)) {
     reading.faults.add(place, describeFound(value), 'an object in braces');
     return undefined;
@@ -35,7 +40,11 @@ export function openObject(reading: Reading, place: Place, value: unknown, keys:
     reading.faults.add(placeWithin(place, key, `key ${quoted(key)}`), 'a key that is not known here', right);
   }
   for (const key of missing) {
-    reading.faults.add(placeWithin(place, key, keyInWords(key)), 'nothing', `the key ${quoted(key)} with a value`);
+    reading.faults.add(
+      placeWithin(place, key, keyInWords(key)),
+      'nothing',
+      `the key ${quoted(key)} with a value`,
+    );
   }
   return { place, entries };
 }
@@ -63,7 +72,12 @@ export function exactlyOneKey<Key extends string>(
 }
 
 /** Reads what stands under a key, or takes the fallback where the key is not there. */
-export function orElse<T>(object: OpenedObject, key: string, fallback: T, read: () => T | undefined): T | undefined {
+export function orElse<T>(
+  object: OpenedObject,
+  key: string,
+  fallback: T,
+  read: () => T | undefined,
+): T | undefined {
   return object.entries.has(key) ? read() : fallback;
 }
 

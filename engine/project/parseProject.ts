@@ -52,8 +52,14 @@ function ofCurrentVersion(
   }
   const upgraded = upgradeProject(project, version);
   if (upgraded !== null) return upgraded;
-  const found = version > CURRENT_VERSION ? `version ${version}, which is newer than this program` : `version ${version}, which there never was`;
-  const right = version > CURRENT_VERSION ? `version ${CURRENT_VERSION}, or a newer program` : `version ${CURRENT_VERSION}`;
+  const found =
+    version > CURRENT_VERSION
+      ? `version ${version}, which is newer than this program`
+      : `version ${version}, which there never was`;
+  const right =
+    version > CURRENT_VERSION
+      ? `version ${CURRENT_VERSION}, or a newer program`
+      : `version ${CURRENT_VERSION}`;
   reading.faults.add(place('version'), found, right);
   return undefined;
 }

@@ -24,7 +24,8 @@ export function physicalMarginal(
 ): Marginal | undefined {
   const { low, high } = reachOf(marginal);
   const below = isBelowRange(range, low);
-  if (!below && high <= range.high) return marginal.kind === 'normal' ? cutAtRange(marginal, range) : marginal;
+  if (!below && high <= range.high)
+    return marginal.kind === 'normal' ? cutAtRange(marginal, range) : marginal;
   const found = `values ${below ? 'down' : 'up'} to ${Number((below ? low : high).toPrecision(4))}`;
   reading.faults.add(place, found, `values ${rangeInWords(range)}${remedy(marginal, below)}`);
   return undefined;

@@ -8,8 +8,10 @@ import { aboveUpTo, betweenBoth, fromTo } from './numberRange.ts';
 export const PHYSICAL = {
   soilUnitWeight: fromTo(WATER_UNIT_WEIGHT, 40),
   fillUnitWeight: aboveUpTo(0, 40),
-  /** Cc, Cr, Cs, Ck: change of void ratio over a tenfold stress or permeability. */
+  /** Cc, Cr, Cs: change of void ratio over a tenfold stress. */
   index: aboveUpTo(0, 20),
+  /** Ck: change of void ratio over a tenfold permeability; far below that of any soil k would vanish. */
+  permeabilityIndex: fromTo(0.05, 20),
   /** Cr/Cc and Cs/Cc; the part above 1 is set to 1 and counted. */
   indexRatio: aboveUpTo(0, 5),
   voidRatio: aboveUpTo(0, 30),

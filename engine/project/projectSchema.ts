@@ -85,12 +85,22 @@ export function projectSchema(): Schema {
         note: TEXT_SCHEMA,
       }),
       points: listSchema(
-        objectSchema(POINT_KEYS, { name: NAME_SCHEMA, x_m: POSITION, fixed: SWITCH_SCHEMA, note: TEXT_SCHEMA }),
+        objectSchema(POINT_KEYS, {
+          name: NAME_SCHEMA,
+          x_m: POSITION,
+          fixed: SWITCH_SCHEMA,
+          note: TEXT_SCHEMA,
+        }),
         1,
         MOST.points,
       ),
       pairs: listSchema(
-        objectSchema(PAIR_KEYS, { name: NAME_SCHEMA, first: NAME_SCHEMA, second: NAME_SCHEMA, note: TEXT_SCHEMA }),
+        objectSchema(PAIR_KEYS, {
+          name: NAME_SCHEMA,
+          first: NAME_SCHEMA,
+          second: NAME_SCHEMA,
+          note: TEXT_SCHEMA,
+        }),
         0,
         MOST.pairs,
       ),
@@ -102,8 +112,8 @@ export function projectSchema(): Schema {
       }),
       limits: listSchema(limitSchema(), 0, MOST.limits),
       model_factors: objectSchema(MODEL_FACTOR_KEYS, {
-        settlement: uncertainSchema(PHYSICAL.modelFactor, 'does_not_vary', FACTOR_MARGINALS),
-        rate: uncertainSchema(PHYSICAL.modelFactor, 'does_not_vary', FACTOR_MARGINALS),
+        settlement: uncertainSchema(PHYSICAL.modelFactor, 'nowhere', FACTOR_MARGINALS),
+        rate: uncertainSchema(PHYSICAL.modelFactor, 'nowhere', FACTOR_MARGINALS),
         note: TEXT_SCHEMA,
       }),
       rank_correlations: listSchema(
@@ -141,11 +151,11 @@ function layerSchema(): Schema {
       name: NAME_SCHEMA,
       id: NAME_SCHEMA,
       soil: NAME_SCHEMA,
-      thickness_m: uncertainSchema(PHYSICAL.layerThickness, 'varies_along_section'),
+      thickness_m: uncertainSchema(PHYSICAL.layerThickness, 'along_section'),
       borings: listSchema(boring, 1, MOST.borings),
       thickness_factor: uncertainSchema(
         PHYSICAL.thicknessFactor,
-        'varies_along_section',
+        'along_section',
         MARGINAL_KINDS,
         CENTRAL.thicknessFactor,
       ),
@@ -164,7 +174,7 @@ function drainSchema(): Schema {
       spacing_m: numberSchema(PHYSICAL.drainSpacing),
       diameter_m: numberSchema(PHYSICAL.drainDiameter),
       band: objectSchema({ required: ['width_mm', 'thickness_mm'] }, { width_mm: size, thickness_mm: size }),
-      smear_ratio: uncertainSchema(PHYSICAL.smearRatio, 'does_not_vary', SMEAR_MARGINALS),
+      smear_ratio: uncertainSchema(PHYSICAL.smearRatio, 'nowhere', SMEAR_MARGINALS),
       permeability_ratio: uncertainSchema(PHYSICAL.permeabilityRatio),
       discharge_capacity_m3_per_year: uncertainSchema(PHYSICAL.dischargeCapacity),
       top_m: numberSchema(PHYSICAL.depth),

@@ -71,7 +71,10 @@ export function fixedNumber(name: string, label: string, value: number): Uncerta
 }
 
 /** A soil that follows Cc and Cr. */
-export function readCompressibleSoil(source: SoilSource, name: string | undefined): CompressibleSoil | undefined {
+export function readCompressibleSoil(
+  source: SoilSource,
+  name: string | undefined,
+): CompressibleSoil | undefined {
   const { reading, object, owner } = source;
   const compressionIndex = soilNumber(source, 'compression_index', PHYSICAL.index);
   const recompression = indexOrRatio(source, 'recompression', compressionIndex);
@@ -141,13 +144,18 @@ function readPreconsolidation({ reading, object, owner }: SoilSource): Preconsol
   if (!object.entries.has('preconsolidation')) return undefined;
   const place = placeOfKey(object, 'preconsolidation');
   const keys = ['ocr', 'pop_kPa', 'profile'] as const;
-  const opened = openObject(reading, place, object.entries.get('preconsolidation'), { required: [], optional: keys });
+  const opened = openObject(reading, place, object.entries.get('preconsolidation'), {
+    required: [],
+    optional: keys,
+  });
   const kind = opened && exactlyOneKey(reading, opened, keys);
   if (opened === undefined || kind === undefined) return undefined;
   const source = { reading, object: opened, owner };
   if (kind === 'profile') return readProfile(source);
   if (kind === 'ocr') {
-    const ocr = soilNumber(source, kind, PHYSICAL.overconsolidationRatio, { central: CENTRAL.overconsolidationRatio });
+    const ocr = soilNumber(source, kind, PHYSICAL.overconsolidationRatio, {
+      central: CENTRAL.overconsolidationRatio,
+    });
     return ocr && { kind, ocr };
   }
   const pop = soilNumber(source, kind, PHYSICAL.preOverburden, { central: CENTRAL.preOverburden });
@@ -174,21 +182,30 @@ function readProfile({ reading, object, owner }: SoilSource): Preconsolidation |
   const [upper, lower] = ends ?? [];
   if (upper === undefined || lower === undefined) return undefined;
   if (upper.depth < lower.depth) return { kind: 'profile', upper, lower };
-  reading.faults.add(placeOfKey(object, 'profile'), `depths of ${upper.depth} and ${lower.depth} m`, 'the second deeper than the first');
+  reading.faults.add(
+    placeOfKey(object, 'profile'),
+    `depths of ${upper.depth} and ${lower.depth} m`,
+    'the second deeper than the first',
+  );
   return undefined;
 }
 
 function readPermeability({ reading, object, owner }: SoilSource): PermeabilityLaw | undefined {
   if (!object.entries.has('consolidation')) return undefined;
-  const opened = openObject(reading, placeOfKey(object, 'consolidation'), object.entries.get('consolidation'), {
-    required: [],
-    optional: ['cv_m2_per_year', 'k0_m_per_s', 'permeability_index'],
-  });
+  const opened = openObject(
+    reading,
+    placeOfKey(object, 'consolidation'),
+    object.entries.get('consolidation'),
+    {
+      required: [],
+      optional: ['cv_m2_per_year', 'k0_m_per_s', 'permeability_index'],
+    },
+  );
   const key = opened && exactlyOneKey(reading, opened, ['cv_m2_per_year', 'k0_m_per_s']);
   if (opened === undefined || key === undefined) return undefined;
   const source = { reading, object: opened, owner };
   const permeabilityIndex = orElse<UncertainNumber | null>(opened, 'permeability_index', null, () =>
-    soilNumber(source, 'permeability_index', PHYSICAL.index),
+    soilNumber(source, 'permeability_index', PHYSICAL.permeabilityIndex),
   );
   if (key === 'cv_m2_per_year') {
     return whole<PermeabilityLaw & { kind: 'cv' }>({

@@ -20,42 +20,62 @@ export function readCorrelations(reading: Reading, project: OpenedObject): RankC
   const paired = new Set<string>();
   const places: Place[] = [];
   const count = { least: 0, most: MOST.correlations };
-  const members = readMembers(reading, project, 'rank_correlations', count, 'rank correlation', (place, value) => {
-    places.push(place);
-    const object = openObject(reading, place, value, CORRELATION_KEYS);
-    if (object === undefined) return undefined;
-    readText(reading, object, 'note');
-    const rank = readNumber(reading, object, 'rank_correlation', RANK);
-    const inputs = readList(reading, object, 'between', { least: 2, most: 2 })?.map((name, i) =>
-      readInput(reading, placeWithin(placeOfKey(object, 'between'), i, `input ${i + 1}`), name),
-    );
-    const [first, second] = inputs ?? [];
-    if (first === undefined || second === undefined) return undefined;
-    const pair = first < second ? `${first} ${second}` : `${second} ${first}`;
-    if (first === second) {
-      reading.faults.add(placeOfKey(object, 'between'), 'an input with itself', 'two different inputs');
-    } else if (paired.has(pair)) {
-      reading.faults.add(placeOfKey(object, 'between'), 'a pair that stands above already', 'each pair once');
-    }
-    paired.add(pair);
-    return whole<RankCorrelation>({ first, second, rank });
-  });
+  const members = readMembers(
+    reading,
+    project,
+    'rank_correlations',
+    count,
+    'rank correlation',
+    (place, value) => {
+      places.push(place);
+      const object = openObject(reading, place, value, CORRELATION_KEYS);
+      if (object === undefined) return undefined;
+      readText(reading, object, 'note');
+      const rank = readNumber(reading, object, 'rank_correlation', RANK);
+      const inputs = readList(reading, object, 'between', { least: 2, most: 2 })?.map((name, i) =>
+        readInput(reading, placeWithin(placeOfKey(object, 'between'), i, `input ${i + 1}`), name),
+      );
+      const [first, second] = inputs ?? [];
+      if (first === undefined || second === undefined) return undefined;
+      const pair = first < second ? `${first} ${second}` : `${second} ${first}`;
+      if (first === second) {
+        reading.faults.add(placeOfKey(object, 'between'), 'an input with itself', 'two different inputs');
+      } else if (paired.has(pair)) {
+        reading.faults.add(
+          placeOfKey(object, 'between'),
+          'a pair that stands above already',
+          'each pair once',
+        );
+      }
+      paired.add(pair);
+      return whole<RankCorrelation>({ first, second, rank });
+    },
+  );
   const correlations = members && wholeList(members);
-  if (correlations !== undefined && paired.size === correlations.length) refuseIndefinite(reading, correlations, places);
+  if (correlations !== undefined && paired.size === correlations.length)
+    refuseIndefinite(reading, correlations, places);
   return correlations;
 }
 
 /** Place among the inputs of the one that a permanent name names. */
 function readInput(reading: Reading, place: Place, name: unknown): number | undefined {
   if (typeof name !== 'string') {
-    reading.faults.add(place, describeFound(name), 'the permanent name of an input, such as "soil/<name>/compression_index"');
+    reading.faults.add(
+      place,
+      describeFound(name),
+      'the permanent name of an input, such as "soil/<name>/compression_index"',
+    );
     return undefined;
   }
   const index = reading.inputs.findIndex((input) => input.name === name);
   if (index >= 0) return index;
   if (reading.brokenNames.has(name)) return undefined;
   if (reading.fixedNames.has(name)) {
-    reading.faults.add(place, `${quoted(name)}, which is fixed`, 'an input with a marginal that is not fixed');
+    reading.faults.add(
+      place,
+      `${quoted(name)}, which is fixed`,
+      'an input with a marginal that is not fixed',
+    );
     return undefined;
   }
   const names = reading.inputs.map((input) => input.name);
@@ -68,7 +88,11 @@ function readInput(reading: Reading, place: Place, name: unknown): number | unde
   return undefined;
 }
 
-function refuseIndefinite(reading: Reading, correlations: readonly RankCorrelation[], places: readonly Place[]): void {
+function refuseIndefinite(
+  reading: Reading,
+  correlations: readonly RankCorrelation[],
+  places: readonly Place[],
+): void {
   const named = new Set(correlations.flatMap(({ first, second }) => [first, second]));
   if (named.size > MOST_INPUTS) {
     const where = { pointer: '/rank_correlations', path: 'rank correlations' };
@@ -78,7 +102,8 @@ function refuseIndefinite(reading: Reading, correlations: readonly RankCorrelati
   const breaking = firstBreakingPair(correlations);
   if (breaking < 0) return;
   const name = (input: number) => reading.inputs[input].name;
-  const pairInWords = ({ first, second, rank }: RankCorrelation) => `${name(first)} with ${name(second)} ${rank}`;
+  const pairInWords = ({ first, second, rank }: RankCorrelation) =>
+    `${name(first)} with ${name(second)} ${rank}`;
   const linked = linkedTo(correlations, breaking);
   const offer = nearestRankCorrelations(linked);
   const right =

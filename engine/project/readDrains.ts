@@ -35,19 +35,32 @@ export function readDrains(reading: Reading, project: OpenedObject): Drains | nu
     if (object === undefined) return undefined;
     readText(reading, object, 'note');
     const number = (key: string, range: (typeof PHYSICAL)['year']) => readNumber(reading, object, key, range);
-    const edge = (key: string, fallback: number) => orElse(object, key, fallback, () => number(key, PHYSICAL.position));
+    const edge = (key: string, fallback: number) =>
+      orElse(object, key, fallback, () => number(key, PHYSICAL.position));
     const drains = whole<Drains>({
       pattern: readChoice(reading, object, 'pattern', DRAIN_PATTERNS),
       spacing: number('spacing_m', PHYSICAL.drainSpacing),
       diameter: readDiameter(reading, object),
-      smearRatio: orElse(object, 'smear_ratio', fixedNumber('drains/smear_ratio', 'smear ratio of the drains', 1), () =>
-        readUncertain(reading, object, 'smear_ratio', { owner: OWNER, range: PHYSICAL.smearRatio, kinds: SMEAR_MARGINALS }),
+      smearRatio: orElse(
+        object,
+        'smear_ratio',
+        fixedNumber('drains/smear_ratio', 'smear ratio of the drains', 1),
+        () =>
+          readUncertain(reading, object, 'smear_ratio', {
+            owner: OWNER,
+            range: PHYSICAL.smearRatio,
+            kinds: SMEAR_MARGINALS,
+          }),
       ),
       permeabilityRatio: orElse(
         object,
         'permeability_ratio',
         fixedNumber('drains/permeability_ratio', 'permeability ratio of the drains', 1),
-        () => readUncertain(reading, object, 'permeability_ratio', { owner: OWNER, range: PHYSICAL.permeabilityRatio }),
+        () =>
+          readUncertain(reading, object, 'permeability_ratio', {
+            owner: OWNER,
+            range: PHYSICAL.permeabilityRatio,
+          }),
       ),
       dischargeCapacity: orElse<UncertainNumber | null>(object, 'discharge_capacity_m3_per_year', null, () =>
         readUncertain(reading, object, 'discharge_capacity_m3_per_year', {
@@ -87,7 +100,10 @@ function readDiameter(reading: Reading, object: OpenedObject): number | undefine
   return (2 * (width + thickness)) / (1_000 * Math.PI);
 }
 
-export const VACUUM_KEYS = { required: ['pressure_kPa', 'start_year', 'end_year'], optional: ['note'] } as const;
+export const VACUUM_KEYS = {
+  required: ['pressure_kPa', 'start_year', 'end_year'],
+  optional: ['note'],
+} as const;
 
 /** The vacuum of a project; null where there is none. */
 export function readVacuum(reading: Reading, project: OpenedObject): Vacuum | null | undefined {

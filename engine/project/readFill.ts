@@ -39,8 +39,13 @@ export function readFill(reading: Reading, project: OpenedObject): ReadFill | un
   if (object === undefined) return undefined;
   readText(reading, object, 'note');
   const identities: Named[] = [];
-  const lifts = readMembers(reading, object, 'lifts', { least: 0, most: MOST.lifts }, 'lift', (place, value) =>
-    readLift(reading, place, value, identities),
+  const lifts = readMembers(
+    reading,
+    object,
+    'lifts',
+    { least: 0, most: MOST.lifts },
+    'lift',
+    (place, value) => readLift(reading, place, value, identities),
   );
   refuseSameNames(reading, 'lift', identities);
   const held = orElse(object, 'held_to_level', true, () => readSwitch(reading, object, 'held_to_level'));
@@ -74,9 +79,17 @@ function readLift(reading: Reading, place: Place, value: unknown, identities: Na
   const standing = orElse(object, 'standing', false, () => readSwitch(reading, object, 'standing'));
   const hasPlacing = object.entries.has('placing');
   if (standing === true && hasPlacing) {
-    reading.faults.add(placeOfKey(object, 'placing'), 'a placing of a standing lift', 'none: it stands already');
+    reading.faults.add(
+      placeOfKey(object, 'placing'),
+      'a placing of a standing lift',
+      'none: it stands already',
+    );
   } else if (standing === false && !hasPlacing) {
-    reading.faults.add(placeOfKey(object, 'placing'), 'nothing', 'the key "placing" with its dates, or "standing": true');
+    reading.faults.add(
+      placeOfKey(object, 'placing'),
+      'nothing',
+      'the key "placing" with its dates, or "standing": true',
+    );
   }
   const placing = orElse(object, 'placing', null, () => readPeriod(reading, object, 'placing', owner));
   const [crestWidth, leftSlope, rightSlope] = [
@@ -94,7 +107,10 @@ function readLift(reading: Reading, place: Place, value: unknown, identities: Na
     leftSlope,
     rightSlope,
     thickness: readUncertain(reading, object, 'thickness_m', { owner, range: PHYSICAL.liftThickness }),
-    unitWeight: readUncertain(reading, object, 'unit_weight_kN_m3', { owner, range: PHYSICAL.fillUnitWeight }),
+    unitWeight: readUncertain(reading, object, 'unit_weight_kN_m3', {
+      owner,
+      range: PHYSICAL.fillUnitWeight,
+    }),
     standing,
     placing: standing === false && placing === null ? undefined : placing,
     removal: orElse(object, 'removal', null, () => readPeriod(reading, object, 'removal', owner)),

@@ -22,28 +22,44 @@ export function readLayers(
   soils: readonly (string | undefined)[],
 ): Layer[] | undefined {
   const identities: Named[] = [];
-  const layers = readMembers(reading, project, 'layers', { least: 1, most: MOST.layers }, 'layer', (place, value) => {
-    const object = openObject(reading, place, value, LAYER_KEYS);
-    if (object === undefined) return undefined;
-    const name = readName(reading, object, 'name');
-    const id = readName(reading, object, 'id');
-    readText(reading, object, 'note');
-    identities.push({ place, name, id });
-    const owner = { name: `layer/${id ?? name ?? ''}`, label: name ?? 'the layer' };
-    return whole<Layer>({ name, soil: soilOf(reading, object, soils), thickness: readThickness(reading, object, owner) });
-  });
+  const layers = readMembers(
+    reading,
+    project,
+    'layers',
+    { least: 1, most: MOST.layers },
+    'layer',
+    (place, value) => {
+      const object = openObject(reading, place, value, LAYER_KEYS);
+      if (object === undefined) return undefined;
+      const name = readName(reading, object, 'name');
+      const id = readName(reading, object, 'id');
+      readText(reading, object, 'note');
+      identities.push({ place, name, id });
+      const owner = { name: `layer/${id ?? name ?? ''}`, label: name ?? 'the layer' };
+      return whole<Layer>({
+        name,
+        soil: soilOf(reading, object, soils),
+        thickness: readThickness(reading, object, owner),
+      });
+    },
+  );
   refuseSameNames(reading, 'layer', identities);
   return layers && wholeList(layers);
 }
 
-function soilOf(reading: Reading, object: OpenedObject, soils: readonly (string | undefined)[]): number | undefined {
+function soilOf(
+  reading: Reading,
+  object: OpenedObject,
+  soils: readonly (string | undefined)[],
+): number | undefined {
   const name = readName(reading, object, 'soil');
   if (name === undefined) return undefined;
   const index = soils.indexOf(name);
   if (index >= 0) return index;
   const known = soils.filter((soil) => soil !== undefined);
   const nearest = nearestWord(name, known);
-  const right = nearest !== null ? quoted(nearest) : `the name of a soil${known.length > 0 ? `: ${inWords(known)}` : ''}`;
+  const right =
+    nearest !== null ? quoted(nearest) : `the name of a soil${known.length > 0 ? `: ${inWords(known)}` : ''}`;
   reading.faults.add(placeOfKey(object, 'soil'), `the text ${quoted(name)}, which no soil is called`, right);
   return undefined;
 }
@@ -104,7 +120,11 @@ function readBorings(reading: Reading, object: OpenedObject) {
   const place = placeOfKey(object, 'borings');
   const disordered = x.findIndex((position, i) => i > 0 && !(position > x[i - 1]));
   if (disordered > 0) {
-    reading.faults.add(place, `a boring at x = ${x[disordered]} m after one at ${x[disordered - 1]} m`, 'borings from left to right, each x once');
+    reading.faults.add(
+      place,
+      `a boring at x = ${x[disordered]} m after one at ${x[disordered - 1]} m`,
+      'borings from left to right, each x once',
+    );
     return undefined;
   }
   if (thickness.every((each) => each === 0)) {

@@ -14,7 +14,12 @@ const MILLIMETRES_IN_METRE = 1_000;
 export const LIMITED_RESULTS: Readonly<
   Record<
     LimitedResult,
-    { readonly of: 'point' | 'pair'; readonly key: string; readonly range: NumberRange; readonly words: string }
+    {
+      readonly of: 'point' | 'pair';
+      readonly key: string;
+      readonly range: NumberRange;
+      readonly words: string;
+    }
   >
 > = {
   settlement_at_horizon: ofSettlement('point', 'settlement at the horizon'),
@@ -54,35 +59,43 @@ export function readLimits(
   times: ReadTimes | undefined,
 ): Limit[] | undefined {
   const named: Named[] = [];
-  const limits = readMembers(reading, project, 'limits', { least: 0, most: MOST.limits }, 'limit', (place, value) => {
-    const object = openObject(reading, place, value, LIMIT_KEYS);
-    if (object === undefined) return undefined;
-    readText(reading, object, 'note');
-    const result = readChoice(reading, object, 'result', Object.keys(LIMITED_RESULTS) as LimitedResult[]);
-    if (result === undefined) {
-      readName(reading, object, 'name');
-      return undefined;
-    }
-    const { of, key, range, words } = LIMITED_RESULTS[result];
-    refuseStrangers(reading, object, result);
-    for (const each of [of, key]) exactlyOneKey(reading, object, [each]);
-    const names = of === 'point' ? points : pairs;
-    const place_ = readReference(reading, object, of, names, of);
-    const given = readNumber(reading, object, key, range);
-    const unnamed = `${words}${place_ === undefined ? '' : ` at ${names[place_]}`}${
-      object.entries.has('date_year') ? ` from ${String(object.entries.get('date_year'))}` : ''
-    }`;
-    const name = orElse(object, 'name', unnamed, () => readName(reading, object, 'name'));
-    named.push({ place, name: object.entries.has('name') ? name : undefined });
-    return whole<Limit>({
-      name,
-      result,
-      point: of === 'point' ? place_ : -1,
-      pair: of === 'pair' ? place_ : -1,
-      value: given === undefined ? undefined : key === 'limit_m_per_m' ? given : given / MILLIMETRES_IN_METRE,
-      date: readDate(reading, object, times),
-    });
-  });
+  const limits = readMembers(
+    reading,
+    project,
+    'limits',
+    { least: 0, most: MOST.limits },
+    'limit',
+    (place, value) => {
+      const object = openObject(reading, place, value, LIMIT_KEYS);
+      if (object === undefined) return undefined;
+      readText(reading, object, 'note');
+      const result = readChoice(reading, object, 'result', Object.keys(LIMITED_RESULTS) as LimitedResult[]);
+      if (result === undefined) {
+        readName(reading, object, 'name');
+        return undefined;
+      }
+      const { of, key, range, words } = LIMITED_RESULTS[result];
+      refuseStrangers(reading, object, result);
+      for (const each of [of, key]) exactlyOneKey(reading, object, [each]);
+      const names = of === 'point' ? points : pairs;
+      const place_ = readReference(reading, object, of, names, of);
+      const given = readNumber(reading, object, key, range);
+      const unnamed = `${words}${place_ === undefined ? '' : ` at ${names[place_]}`}${
+        object.entries.has('date_year') ? ` from ${String(object.entries.get('date_year'))}` : ''
+      }`;
+      const name = orElse(object, 'name', unnamed, () => readName(reading, object, 'name'));
+      named.push({ place, name: object.entries.has('name') ? name : undefined });
+      return whole<Limit>({
+        name,
+        result,
+        point: of === 'point' ? place_ : -1,
+        pair: of === 'pair' ? place_ : -1,
+        value:
+          given === undefined ? undefined : key === 'limit_m_per_m' ? given : given / MILLIMETRES_IN_METRE,
+        date: readDate(reading, object, times),
+      });
+    },
+  );
   refuseSameNames(reading, 'limit', named);
   return limits && wholeList(limits);
 }

@@ -143,7 +143,11 @@ function beta({ reading, object, range }: Source): Marginal | string | undefined
   const needed = form === 'alpha' ? 'beta' : null;
   for (const key of strangers) {
     if (form === undefined || !object.entries.has(key)) continue;
-    reading.faults.add(placeOfKey(object, key), `a ${key} beside the ${form}`, 'either alpha and beta, or mean and cov or deviation');
+    reading.faults.add(
+      placeOfKey(object, key),
+      `a ${key} beside the ${form}`,
+      'either alpha and beta, or mean and cov or deviation',
+    );
     return undefined;
   }
   if (needed !== null && !object.entries.has(needed)) {
@@ -159,13 +163,21 @@ function beta({ reading, object, range }: Source): Marginal | string | undefined
 }
 
 /** The deviation, given by itself or as a share of the mean. */
-function deviationBeside(reading: Reading, object: OpenedObject, mean: number | undefined): number | undefined {
+function deviationBeside(
+  reading: Reading,
+  object: OpenedObject,
+  mean: number | undefined,
+): number | undefined {
   const key = exactlyOneKey(reading, object, ['cov', 'deviation']);
   if (key === undefined) return undefined;
   const value = readNumber(reading, object, key, key === 'cov' ? VARIATION : POSITIVE_NUMBER);
   if (value === undefined || mean === undefined || key === 'deviation') return value;
   if (mean > 0) return value * mean;
-  reading.faults.add(placeOfKey(object, 'cov'), `a cov beside a mean of ${mean}`, 'a mean above 0, or the key "deviation"');
+  reading.faults.add(
+    placeOfKey(object, 'cov'),
+    `a cov beside a mean of ${mean}`,
+    'a mean above 0, or the key "deviation"',
+  );
   return undefined;
 }
 
@@ -180,6 +192,10 @@ function column({ reading, object, range }: Source, key: 'values' | 'cumulative'
 }
 
 function numbersIn(object: OpenedObject): string {
-  const numbers = [...object.entries].filter(([, value]) => typeof value === 'number' || Array.isArray(value));
-  return numbers.map(([key, value]) => `${key} ${typeof value === 'number' ? value : describeFound(value)}`).join(', ');
+  const numbers = [...object.entries].filter(
+    ([, value]) => typeof value === 'number' || Array.isArray(value),
+  );
+  return numbers
+    .map(([key, value]) => `${key} ${typeof value === 'number' ? value : describeFound(value)}`)
+    .join(', ');
 }

@@ -18,18 +18,25 @@ export interface ReadNamed<T> {
 
 export function readPoints(reading: Reading, project: OpenedObject): ReadNamed<Point> {
   const named: Named[] = [];
-  const points = readMembers(reading, project, 'points', { least: 1, most: MOST.points }, 'point', (place, value) => {
-    const object = openObject(reading, place, value, POINT_KEYS);
-    const name = object && readName(reading, object, 'name');
-    named.push({ place, name });
-    if (object === undefined) return undefined;
-    readText(reading, object, 'note');
-    return whole<Point>({
-      name,
-      x: readNumber(reading, object, 'x_m', PHYSICAL.position),
-      fixed: orElse(object, 'fixed', false, () => readSwitch(reading, object, 'fixed')),
-    });
-  });
+  const points = readMembers(
+    reading,
+    project,
+    'points',
+    { least: 1, most: MOST.points },
+    'point',
+    (place, value) => {
+      const object = openObject(reading, place, value, POINT_KEYS);
+      const name = object && readName(reading, object, 'name');
+      named.push({ place, name });
+      if (object === undefined) return undefined;
+      readText(reading, object, 'note');
+      return whole<Point>({
+        name,
+        x: readNumber(reading, object, 'x_m', PHYSICAL.position),
+        fixed: orElse(object, 'fixed', false, () => readSwitch(reading, object, 'fixed')),
+      });
+    },
+  );
   refuseSameNames(reading, 'point', named);
   return { names: named.map((point) => point.name), members: points && wholeList(points) };
 }
@@ -41,23 +48,31 @@ export function readPairs(
   points: readonly (string | undefined)[],
 ): ReadNamed<Pair> {
   const named: Named[] = [];
-  const pairs = readMembers(reading, project, 'pairs', { least: 0, most: MOST.pairs }, 'pair', (place, value) => {
-    const object = openObject(reading, place, value, PAIR_KEYS);
-    if (object === undefined) {
-      named.push({ place, name: undefined });
-      return undefined;
-    }
-    readText(reading, object, 'note');
-    const first = readReference(reading, object, 'first', points, 'point');
-    const second = readReference(reading, object, 'second', points, 'point');
-    const both = first === undefined || second === undefined ? undefined : `${points[first]} – ${points[second]}`;
-    const name = orElse(object, 'name', both, () => readName(reading, object, 'name'));
-    named.push({ place, name });
-    if (first !== undefined && first === second) {
-      reading.faults.add(place, `the point ${quoted(points[first]!)} twice`, 'two different points');
-    }
-    return whole<Pair>({ name, first, second });
-  });
+  const pairs = readMembers(
+    reading,
+    project,
+    'pairs',
+    { least: 0, most: MOST.pairs },
+    'pair',
+    (place, value) => {
+      const object = openObject(reading, place, value, PAIR_KEYS);
+      if (object === undefined) {
+        named.push({ place, name: undefined });
+        return undefined;
+      }
+      readText(reading, object, 'note');
+      const first = readReference(reading, object, 'first', points, 'point');
+      const second = readReference(reading, object, 'second', points, 'point');
+      const both =
+        first === undefined || second === undefined ? undefined : `${points[first]} – ${points[second]}`;
+      const name = orElse(object, 'name', both, () => readName(reading, object, 'name'));
+      named.push({ place, name });
+      if (first !== undefined && first === second) {
+        reading.faults.add(place, `the point ${quoted(points[first]!)} twice`, 'two different points');
+      }
+      return whole<Pair>({ name, first, second });
+    },
+  );
   refuseSameNames(reading, 'pair', named);
   return { names: named.map((pair) => pair.name), members: pairs && wholeList(pairs) };
 }
@@ -81,8 +96,15 @@ export function readReference(
   const known = names.filter((name) => name !== undefined);
   const nearest = nearestWord(value, known);
   const most = known.slice(0, MOST_NAMED);
-  const right = nearest !== null ? quoted(nearest) : `the name of a ${member}${most.length > 0 ? `: ${inWords(most)}` : ''}`;
-  reading.faults.add(placeOfKey(object, key), `the text ${quoted(value)}, which no ${member} is called`, right);
+  const right =
+    nearest !== null
+      ? quoted(nearest)
+      : `the name of a ${member}${most.length > 0 ? `: ${inWords(most)}` : ''}`;
+  reading.faults.add(
+    placeOfKey(object, key),
+    `the text ${quoted(value)}, which no ${member} is called`,
+    right,
+  );
   return undefined;
 }
 

@@ -5,7 +5,15 @@ import { MOST, PHYSICAL } from './physicalRanges.ts';
 import { placeWithin } from './place.ts';
 import { fixedNumber } from './readCompressibleSoil.ts';
 import { readUncertain } from './readUncertain.ts';
-import { numberFrom, readChoice, readList, readNumber, readSwitch, readText, readWholeNumber } from './readValues.ts';
+import {
+  numberFrom,
+  readChoice,
+  readList,
+  readNumber,
+  readSwitch,
+  readText,
+  readWholeNumber,
+} from './readValues.ts';
 import { whole, wholeList, type Reading } from './reading.ts';
 
 export const WATER_KEYS = { required: ['depth_m'], optional: ['base_excess_head_m', 'note'] } as const;
@@ -17,7 +25,10 @@ export const SECONDARY_KEYS = {
 } as const;
 export const MODEL_FACTOR_KEYS = { required: [], optional: ['settlement', 'rate', 'note'] } as const;
 export const SAMPLING_KEYS = { required: ['realisations', 'seed'], optional: ['note'] } as const;
-export const RESULT_KEYS = { required: [], optional: ['percentiles', 'degree_of_consolidation', 'note'] } as const;
+export const RESULT_KEYS = {
+  required: [],
+  optional: ['percentiles', 'degree_of_consolidation', 'note'],
+} as const;
 
 export const REALISATIONS = fromTo(100, MOST.realisations);
 export const SEED = fromTo(0, 9_007_199_254_740_991);
@@ -29,7 +40,12 @@ export const REALISATIONS_STEP = 100;
 const DEFAULT_PERCENTILES: readonly number[] = [5, 25, 50, 75, 95];
 
 /** Opens the object under a key of the project, and reads its note. */
-function openSetting(reading: Reading, project: OpenedObject, key: string, keys: KnownKeys): OpenedObject | undefined {
+function openSetting(
+  reading: Reading,
+  project: OpenedObject,
+  key: string,
+  keys: KnownKeys,
+): OpenedObject | undefined {
   const object = openObject(reading, placeOfKey(project, key), project.entries.get(key), keys);
   if (object !== undefined) readText(reading, object, 'note');
   return object;
@@ -45,7 +61,11 @@ export function readWater(reading: Reading, project: OpenedObject): Model['water
   return whole<Model['water']>({
     depth: readUncertain(reading, object, 'depth_m', { owner, range: PHYSICAL.waterDepth, words: depth }),
     baseExcessHead: orElse(object, 'base_excess_head_m', none, () =>
-      readUncertain(reading, object, 'base_excess_head_m', { owner, range: PHYSICAL.excessHead, words: head }),
+      readUncertain(reading, object, 'base_excess_head_m', {
+        owner,
+        range: PHYSICAL.excessHead,
+        words: head,
+      }),
     ),
   });
 }
@@ -78,7 +98,10 @@ export function readSecondary(reading: Reading, project: OpenedObject): Model['s
 }
 
 export function readModelFactors(reading: Reading, project: OpenedObject): Model['modelFactors'] | undefined {
-  const words = { settlement: 'model factor on settlement', rate: 'model factor on the rate of consolidation' };
+  const words = {
+    settlement: 'model factor on settlement',
+    rate: 'model factor on the rate of consolidation',
+  };
   const one = (key: 'settlement' | 'rate') => fixedNumber(`model/${key}_factor`, words[key], 1);
   const usual = { settlement: one('settlement'), rate: one('rate') };
   return orElse<Model['modelFactors']>(project, 'model_factors', usual, () => {
@@ -127,10 +150,16 @@ export function readResults(reading: Reading, project: OpenedObject): Model['res
 function readPercentiles(reading: Reading, object: OpenedObject): number[] | undefined {
   const list = readList(reading, object, 'percentiles', { least: 1, most: MOST.percentiles });
   const place = placeOfKey(object, 'percentiles');
-  const read = list?.map((value, i) => numberFrom(reading, placeWithin(place, i, `number ${i + 1}`), value, PERCENTILE));
+  const read = list?.map((value, i) =>
+    numberFrom(reading, placeWithin(place, i, `number ${i + 1}`), value, PERCENTILE),
+  );
   const percentiles = read && wholeList(read);
   if (percentiles?.some((percentile, i) => i > 0 && !(percentile > percentiles[i - 1]))) {
-    reading.faults.add(place, `the percentiles ${percentiles.join(', ')}`, 'percentiles that rise, each once');
+    reading.faults.add(
+      place,
+      `the percentiles ${percentiles.join(', ')}`,
+      'percentiles that rise, each once',
+    );
   }
   return percentiles;
 }

@@ -27,12 +27,19 @@ export interface ReadSoils {
 export function readSoils(reading: Reading, project: OpenedObject): ReadSoils {
   const names: (string | undefined)[] = [];
   const identities: { place: Place; name: string | undefined; id: string | undefined }[] = [];
-  const soils = readMembers(reading, project, 'soils', { least: 1, most: MOST.soils }, 'soil', (place, value) => {
-    const { soil, ...identity } = readSoil(reading, place, value);
-    names.push(identity.name);
-    identities.push({ place, ...identity });
-    return soil;
-  });
+  const soils = readMembers(
+    reading,
+    project,
+    'soils',
+    { least: 1, most: MOST.soils },
+    'soil',
+    (place, value) => {
+      const { soil, ...identity } = readSoil(reading, place, value);
+      names.push(identity.name);
+      identities.push({ place, ...identity });
+      return soil;
+    },
+  );
   refuseSameNames(reading, 'soil', identities);
   return { names, soils: soils ?? [] };
 }
@@ -46,7 +53,9 @@ function readSoil(reading: Reading, place: Place, value: unknown) {
         ? POORLY_DRAINING_KEYS
         : COMPRESSIBLE_KEYS;
   if (typeof value === 'object' && value !== null && !Array.isArray(value) && behaviour === undefined) {
-    const given: unknown = Object.hasOwn(value, 'behaviour') ? (value as { behaviour: unknown }).behaviour : undefined;
+    const given: unknown = Object.hasOwn(value, 'behaviour')
+      ? (value as { behaviour: unknown }).behaviour
+      : undefined;
     const right = '"compressible", "stiff_free_draining" or "stiff_poorly_draining"';
     const where = { pointer: `${place.pointer}/behaviour`, path: `${place.path}, behaviour` };
     reading.faults.add(where, describeFound(given), right);
@@ -74,7 +83,9 @@ function readSoil(reading: Reading, place: Place, value: unknown) {
         return whole<StiffPoorlyDrainingSoil>({
           behaviour: 'stiff_poorly_draining',
           ...stiff(),
-          verticalCoefficient: soilNumber(source, 'cv_m2_per_year', PHYSICAL.consolidation, { keepsMean: false }),
+          verticalCoefficient: soilNumber(source, 'cv_m2_per_year', PHYSICAL.consolidation, {
+            keepsMean: false,
+          }),
           horizontalRatio: orElse(
             object,
             'ch_over_cv',

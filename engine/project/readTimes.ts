@@ -10,7 +10,10 @@ export interface ReadTimes {
   readonly outputTimes: readonly number[];
 }
 
-export const TIMES_KEYS = { required: ['handover_year', 'horizon_year'], optional: ['output_years', 'note'] } as const;
+export const TIMES_KEYS = {
+  required: ['handover_year', 'horizon_year'],
+  optional: ['output_years', 'note'],
+} as const;
 
 /** Handover, horizon and output times: handover before the horizon, output times rising up to it. */
 export function readTimes(reading: Reading, project: OpenedObject): ReadTimes | undefined {
@@ -20,12 +23,20 @@ export function readTimes(reading: Reading, project: OpenedObject): ReadTimes | 
   const horizon = readNumber(reading, object, 'horizon_year', PHYSICAL.year);
   const handover = readNumber(reading, object, 'handover_year', PHYSICAL.year);
   if (handover !== undefined && horizon !== undefined && !(handover < horizon)) {
-    reading.faults.add(placeOfKey(object, 'handover_year'), `the year ${handover}`, `a year before the horizon, ${horizon}`);
+    reading.faults.add(
+      placeOfKey(object, 'handover_year'),
+      `the year ${handover}`,
+      `a year before the horizon, ${horizon}`,
+    );
   }
   return whole<ReadTimes>({ handover, horizon, outputTimes: readOutputTimes(reading, object, horizon) });
 }
 
-function readOutputTimes(reading: Reading, object: OpenedObject, horizon: number | undefined): number[] | undefined {
+function readOutputTimes(
+  reading: Reading,
+  object: OpenedObject,
+  horizon: number | undefined,
+): number[] | undefined {
   if (!object.entries.has('output_years')) return [];
   const list = readList(reading, object, 'output_years', { least: 0, most: MOST.outputTimes });
   const place = placeOfKey(object, 'output_years');

@@ -45,7 +45,10 @@ export function readUncertain(
   const name = `${spec.owner.name}/${spec.called ?? keyWithoutUnit(key)}`;
   const described = {
     name,
-    label: spec.owner.label === '' ? spec.words ?? keyInWords(key) : `${spec.words ?? keyInWords(key)} of ${spec.owner.label}`,
+    label:
+      spec.owner.label === ''
+        ? (spec.words ?? keyInWords(key))
+        : `${spec.words ?? keyInWords(key)} of ${spec.owner.label}`,
     unit: unitOfKey(key),
     keepsMean: spec.keepsMean ?? true,
   };
@@ -58,7 +61,12 @@ export function readUncertain(
 
 type Read = Pick<UncertainNumber, 'marginal' | 'spread' | 'source' | 'note'>;
 
-function numberOrMarginal(reading: Reading, place: Place, value: unknown, spec: UncertainSpec): Read | undefined {
+function numberOrMarginal(
+  reading: Reading,
+  place: Place,
+  value: unknown,
+  spec: UncertainSpec,
+): Read | undefined {
   if (typeof value === 'number') {
     const number = numberFrom(reading, place, value, spec.central ?? spec.range);
     if (number === undefined) return undefined;
@@ -78,7 +86,8 @@ function numberOrMarginal(reading: Reading, place: Place, value: unknown, spec: 
   })!;
   const entered = readMarginal(reading, opened, kind, (kind === 'fixed' && spec.central) || spec.range);
   return whole<Read>({
-    marginal: entered && centralMarginal(reading, place, physicalMarginal(reading, place, entered, spec.range), spec),
+    marginal:
+      entered && centralMarginal(reading, place, physicalMarginal(reading, place, entered, spec.range), spec),
     spread: orElse<Spread | null>(opened, 'varies', null, () => spreadOf(reading, opened, kind, spec)),
     source: orElse(opened, 'source', NOT_STATED, () => readSource(reading, opened)),
     note: readText(reading, opened, 'note'),
@@ -91,7 +100,9 @@ function marginalKind(
   value: object,
   kinds: readonly MarginalKind[],
 ): MarginalKind | undefined {
-  const given: unknown = Object.hasOwn(value, 'marginal') ? (value as { marginal: unknown }).marginal : undefined;
+  const given: unknown = Object.hasOwn(value, 'marginal')
+    ? (value as { marginal: unknown }).marginal
+    : undefined;
   const kind = kinds.find((each) => each === given);
   if (kind !== undefined) return kind;
   const nearest = typeof given === 'string' ? nearestWord(given, kinds) : null;
@@ -108,7 +119,11 @@ function spreadOf(
 ): Spread | undefined {
   const place = placeOfKey(object, 'varies');
   if (spec.varies === undefined) {
-    reading.faults.add(place, 'a spread from place to place', 'none here: it has one value for the whole section');
+    reading.faults.add(
+      place,
+      'a spread from place to place',
+      'none here: it has one value for the whole section',
+    );
     return undefined;
   }
   if (kind === 'fixed') {
@@ -120,7 +135,10 @@ function spreadOf(
 
 function readSource(reading: Reading, object: OpenedObject): Source | undefined {
   const place = placeOfKey(object, 'source');
-  const opened = openObject(reading, place, object.entries.get('source'), { required: ['kind'], optional: ['text'] });
+  const opened = openObject(reading, place, object.entries.get('source'), {
+    required: ['kind'],
+    optional: ['text'],
+  });
   return (
     opened &&
     whole<Source>({
@@ -137,8 +155,13 @@ function centralMarginal(
   marginal: Marginal | undefined,
   { central }: UncertainSpec,
 ): Marginal | undefined {
-  if (marginal === undefined || central === undefined || isInRange(central, median(marginal))) return marginal;
-  reading.faults.add(place, `a median of ${shortNumber(median(marginal))}`, `a median ${rangeInWords(central)}`);
+  if (marginal === undefined || central === undefined || isInRange(central, median(marginal)))
+    return marginal;
+  reading.faults.add(
+    place,
+    `a median of ${shortNumber(median(marginal))}`,
+    `a median ${rangeInWords(central)}`,
+  );
   return undefined;
 }
 

@@ -9,7 +9,12 @@ import type { Reading } from './reading.ts';
 const CONTROL_CHARACTERS = /[\u0000-\u001f\u007f]/;
 
 /** A number in a range; −0 is read as 0. Undefined, with a fault, where it is anything else. */
-export function numberFrom(reading: Reading, place: Place, value: unknown, range: NumberRange): number | undefined {
+export function numberFrom(
+  reading: Reading,
+  place: Place,
+  value: unknown,
+  range: NumberRange,
+): number | undefined {
   if (typeof value === 'number' && isInRange(range, value)) return value + 0;
   reading.faults.add(place, describeFound(value), `a number ${rangeInWords(range)}`);
   return undefined;
@@ -61,7 +66,11 @@ function isName(text: string): boolean {
 export function readText(reading: Reading, object: OpenedObject, key: string): string | undefined {
   if (!object.entries.has(key)) return '';
   const value = object.entries.get(key);
-  if (typeof value === 'string' && value.length <= 2 * MOST.textLength && [...value].length <= MOST.textLength) {
+  if (
+    typeof value === 'string' &&
+    value.length <= 2 * MOST.textLength &&
+    [...value].length <= MOST.textLength
+  ) {
     return value;
   }
   const found = typeof value === 'string' ? `a text of ${value.length} characters` : describeFound(value);

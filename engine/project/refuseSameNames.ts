@@ -18,11 +18,19 @@ export function refuseSameNames(reading: Reading, member: string, named: readonl
     const sameName = name !== undefined && names.has(name);
     if (sameName) {
       const where = placeWithin(place, 'name', 'name');
-      reading.faults.add(where, `the name ${quoted(name)} a second time`, `a name that no other ${member} has`);
+      reading.faults.add(
+        where,
+        `the name ${quoted(name)} a second time`,
+        `a name that no other ${member} has`,
+      );
     }
     if (!sameName && identity !== undefined && identities.has(identity)) {
       const where = placeWithin(place, id === undefined ? 'name' : 'id', id === undefined ? 'name' : 'id');
-      reading.faults.add(where, `${quoted(identity)} as what another ${member} is called by`, `an id of its own`);
+      reading.faults.add(
+        where,
+        `${quoted(identity)} as what another ${member} is called by`,
+        `an id of its own`,
+      );
     }
     if (name !== undefined) names.add(name);
     if (identity !== undefined) identities.add(identity);

@@ -35,7 +35,10 @@ function remarksOnGround({ soils, layers, secondary, points }: UnremarkedModel):
   soils.forEach((soil, i) => {
     const pointer = `/soils/${i}`;
     if (!lying.includes(soil)) {
-      remarks.push({ pointer, sentence: `No layer is of the soil ${quoted(soil.name)}: its numbers have no effect.` });
+      remarks.push({
+        pointer,
+        sentence: `No layer is of the soil ${quoted(soil.name)}: its numbers have no effect.`,
+      });
     } else if (secondary.included && soil.behaviour === 'compressible' && soil.secondary === null) {
       const sentence = `The soil ${quoted(soil.name)} has no secondary index: its settlement ends with primary.`;
       remarks.push({ pointer, sentence });
@@ -44,7 +47,9 @@ function remarksOnGround({ soils, layers, secondary, points }: UnremarkedModel):
   layers.forEach(({ name, thickness }, i) => {
     if (thickness.kind === 'even') return;
     const [first, last] = [thickness.x[0], thickness.x[thickness.x.length - 1]];
-    const beyond = points.filter(({ x, fixed }) => !fixed && (x < first || x > last)).map((point) => quoted(point.name));
+    const beyond = points
+      .filter(({ x, fixed }) => !fixed && (x < first || x > last))
+      .map((point) => quoted(point.name));
     if (beyond.length === 0) return;
     const sentence = `Beyond the outermost borings the layer ${quoted(name)} is taken as level: at ${beyond.join(', ')}.`;
     remarks.push({ pointer: `/layers/${i}/borings`, sentence });
@@ -57,7 +62,8 @@ function remarksOnInputs({ inputs, sampling }: UnremarkedModel, places: readonly
   inputs.forEach(({ label, unit, marginal }, i) => {
     const [centre, spread] = [mean(marginal), deviation(marginal)];
     // a date or a level has no zero of its own, so no coefficient of variation
-    if (unit === 'year' || label.includes('level') || label.includes('head') || !(spread > Math.abs(centre))) return;
+    if (unit === 'year' || label.includes('level') || label.includes('head') || !(spread > Math.abs(centre)))
+      return;
     const sentence = `The coefficient of variation of the ${label} is above 1: few tests support so wide a spread.`;
     remarks.push({ pointer: places[i].pointer, sentence });
   });
@@ -82,7 +88,10 @@ function remarksOnQuestion({ points, pairs, limits }: UnremarkedModel): Remark[]
   limits.forEach(({ name, point, pair }, i) => {
     const concerned = point >= 0 ? [points[point]] : [points[pairs[pair].first], points[pairs[pair].second]];
     if (!concerned.every(({ fixed }) => fixed)) return;
-    remarks.push({ pointer: `/limits/${i}`, sentence: `The limit ${quoted(name)} is for what is fixed: it is never passed.` });
+    remarks.push({
+      pointer: `/limits/${i}`,
+      sentence: `The limit ${quoted(name)} is for what is fixed: it is never passed.`,
+    });
   });
   return remarks;
 }

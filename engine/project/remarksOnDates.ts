@@ -33,7 +33,9 @@ export function remarksOnDates(model: UnremarkedModel): Remark[] {
   const earliest = Math.min(...starts.map(centralValue));
   if (!(earliest < horizon)) {
     const sentence =
-      starts.length === 0 ? 'Nothing loads the ground: it does not settle.' : 'Nothing loads the ground before the horizon.';
+      starts.length === 0
+        ? 'Nothing loads the ground: it does not settle.'
+        : 'Nothing loads the ground before the horizon.';
     remarks.push({ pointer: '/fill', sentence });
   } else if (handover <= earliest) {
     remarks.push({ pointer: handoverPointer, sentence: 'Handover lies before anything loads the ground.' });

@@ -41,7 +41,11 @@ export function remarksOnDrains(model: UnremarkedModel): Remark[] {
   return remarks;
 }
 
-function hasOutlet({ soils, boundaries }: UnremarkedModel, drains: Drains, layers: readonly CentralLayer[]): boolean {
+function hasOutlet(
+  { soils, boundaries }: UnremarkedModel,
+  drains: Drains,
+  layers: readonly CentralLayer[],
+): boolean {
   const base = layers[layers.length - 1].base;
   if (boundaries.top === 'drained' && drains.top <= 0) return true;
   if (boundaries.base === 'drained' && drains.foot >= base) return true;

@@ -15,7 +15,10 @@ import { uncertainSchema } from './uncertainSchema.ts';
 
 const POSITION = numberSchema(PHYSICAL.position);
 const UNCERTAIN_YEAR = uncertainSchema(PHYSICAL.year);
-const LENGTH = objectSchema({ required: [], optional: ['from_m', 'to_m'] }, { from_m: POSITION, to_m: POSITION });
+const LENGTH = objectSchema(
+  { required: [], optional: ['from_m', 'to_m'] },
+  { from_m: POSITION, to_m: POSITION },
+);
 const PERIOD = objectSchema(
   { required: ['start_year', 'end_year'] },
   { start_year: UNCERTAIN_YEAR, end_year: UNCERTAIN_YEAR },

@@ -15,7 +15,8 @@ import {
 } from './schemaParts.ts';
 import { uncertainSchema } from './uncertainSchema.ts';
 
-const inGround = (range: NumberRange, fixed = range) => uncertainSchema(range, 'varies_in_ground', MARGINAL_KINDS, fixed);
+const inGround = (range: NumberRange, fixed = range) =>
+  uncertainSchema(range, 'in_ground', MARGINAL_KINDS, fixed);
 
 /** A soil of one of the three behaviours. */
 export function soilSchema(): Schema {
@@ -73,7 +74,7 @@ function compressibleSchema(): Schema {
       {
         cv_m2_per_year: inGround(PHYSICAL.consolidation),
         k0_m_per_s: inGround(PHYSICAL.permeability),
-        permeability_index: inGround(PHYSICAL.index),
+        permeability_index: inGround(PHYSICAL.permeabilityIndex),
       },
       exactlyOneOf('cv_m2_per_year', 'k0_m_per_s'),
     ),

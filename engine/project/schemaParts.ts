@@ -43,11 +43,19 @@ export function listSchema(items: Schema, least: number, most: number): Schema {
  *
  * @throws RangeError when a known key has no schema, or one has that is not known
  */
-export function objectSchema(keys: KnownKeys, properties: Readonly<Record<string, Schema>>, more: Schema = {}): Schema {
+export function objectSchema(
+  keys: KnownKeys,
+  properties: Readonly<Record<string, Schema>>,
+  more: Schema = {},
+): Schema {
   const known = [...keys.required, ...(keys.optional ?? [])];
   const given = Object.keys(properties);
-  const stray = [...known.filter((key) => !given.includes(key)), ...given.filter((key) => !known.includes(key))];
-  if (stray.length > 0) throw new RangeError(`objectSchema: keys and properties must be the same, got ${stray.join(', ')}`);
+  const stray = [
+    ...known.filter((key) => !given.includes(key)),
+    ...given.filter((key) => !known.includes(key)),
+  ];
+  if (stray.length > 0)
+    throw new RangeError(`objectSchema: keys and properties must be the same, got ${stray.join(', ')}`);
   const described = known.map((key) => [key, { description: describedKey(key), ...properties[key] }]);
   return {
     type: 'object',

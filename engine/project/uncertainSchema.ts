@@ -22,14 +22,41 @@ import {
   type Schema,
 } from './schemaParts.ts';
 
-/** Where an uncertain number may vary, if anywhere; the names of the definitions in `SPREAD_SCHEMAS`. */
-export type Varies = 'varies_in_ground' | 'varies_along_section' | 'does_not_vary';
+/** Whether a number may vary from place to place, and how. */
+export type Varies = 'in_ground' | 'along_section' | 'nowhere';
+
+/**
+ * A plain number, or a marginal of one of the kinds.
+ *
+ * @param range of every value that is stated
+ * @param fixedRange of a number that is fixed
+ */
+export function uncertainSchema(
+  range: NumberRange,
+  varies: Varies = 'nowhere',
+  kinds: readonly MarginalKind[] = MARGINAL_KINDS,
+  fixedRange: NumberRange = range,
+): Schema {
+  const value = numberSchema(range);
+  const properties = {
+    ...(kinds === MARGINAL_KINDS ? {} : { marginal: choiceSchema(kinds) }),
+    value: numberSchema(fixedRange),
+    low: value,
+    best: value,
+    high: value,
+    values: { items: value },
+  };
+  return { oneOf: [numberSchema(fixedRange), { $ref: `#/$defs/marginal_${varies}`, properties }] };
+}
 
 const SCALE = numberSchema(PHYSICAL.scaleOfFluctuation);
 const SHARE = numberSchema(PHYSICAL.varianceShare);
 
-/** Definitions that the schema of every uncertain number refers to. */
+/** Definitions that the schema of every uncertain number refers to: the shapes of marginals, without ranges. */
 export const SHARED_DEFINITIONS: Readonly<Record<string, Schema>> = {
+  marginal_nowhere: marginalShape('nowhere'),
+  marginal_in_ground: marginalShape('in_ground'),
+  marginal_along_section: marginalShape('along_section'),
   source: objectSchema(
     { required: ['kind'], optional: ['text'] },
     { kind: choiceSchema(SOURCE_KINDS), text: TEXT_SCHEMA },
@@ -44,33 +71,24 @@ export const SHARED_DEFINITIONS: Readonly<Record<string, Schema>> = {
   ),
 };
 
-/**
- * A plain number, or a marginal of one of the kinds.
- *
- * @param range of every value that is stated
- * @param fixedRange of a number that is fixed
- */
-export function uncertainSchema(
-  range: NumberRange,
-  varies: Varies = 'does_not_vary',
-  kinds: readonly MarginalKind[] = MARGINAL_KINDS,
-  fixedRange: NumberRange = range,
-): Schema {
-  const ofKind = (kind: MarginalKind) => marginalSchema(kind, kind === 'fixed' ? fixedRange : range, varies);
-  return { oneOf: [numberSchema(fixedRange), ...kinds.map(ofKind)] };
+function marginalShape(varies: Varies): Schema {
+  return { oneOf: MARGINAL_KINDS.map((kind) => shapeOfKind(kind, varies)) };
 }
 
-function marginalSchema(kind: MarginalKind, range: NumberRange, varies: Varies): Schema {
+function shapeOfKind(kind: MarginalKind, varies: Varies): Schema {
   const { required, optional } = MARGINAL_KEYS[kind];
-  const mayVary = varies !== 'does_not_vary' && kind !== 'fixed';
-  const keys = { required: ['marginal', ...required], optional: [...optional, ...(mayVary ? ['varies'] : []), 'source', 'note'] };
-  const own = [...required, ...optional].map((key) => [key, valueSchema(kind, key, range)]);
+  const mayVary = varies !== 'nowhere' && kind !== 'fixed';
+  const keys = {
+    required: ['marginal', ...required],
+    optional: [...optional, ...(mayVary ? ['varies'] : []), 'source', 'note'],
+  };
+  const own = [...required, ...optional].map((key) => [key, valueSchema(kind, key)]);
   return objectSchema(
     keys,
     {
       marginal: { const: kind },
       ...(Object.fromEntries(own) as Record<string, Schema>),
-      ...(mayVary ? { varies: { $ref: `#/$defs/${varies}` } } : {}),
+      ...(mayVary ? { varies: { $ref: `#/$defs/varies_${varies}` } } : {}),
       source: { $ref: '#/$defs/source' },
       note: TEXT_SCHEMA,
     },
@@ -78,7 +96,7 @@ function marginalSchema(kind: MarginalKind, range: NumberRange, varies: Varies):
   );
 }
 
-function valueSchema(kind: MarginalKind, key: string, range: NumberRange): Schema {
+function valueSchema(kind: MarginalKind, key: string): Schema {
   switch (key) {
     case 'cov':
       return numberSchema(VARIATION);
@@ -89,32 +107,35 @@ function valueSchema(kind: MarginalKind, key: string, range: NumberRange): Schem
     case 'beta':
       return numberSchema(BETA_SHAPE);
     case 'mean':
-      return numberSchema(kind === 'normal' ? ANY_NUMBER : kind === 'lognormal' ? POSITIVE_NUMBER : range);
+      return numberSchema(kind === 'lognormal' ? POSITIVE_NUMBER : ANY_NUMBER);
     case 'values':
-      return listSchema(numberSchema(range), 2, MOST.tableRows);
+      return listSchema(numberSchema(ANY_NUMBER), 2, MOST.tableRows);
     case 'cumulative':
       return listSchema(numberSchema(CUMULATIVE), 2, MOST.tableRows);
     default:
-      return numberSchema(range);
+      return numberSchema(ANY_NUMBER);
   }
 }
 
 /** Which of a marginal's keys may stand beside each other. */
 function keysTogether(kind: MarginalKind): Schema {
+  const none = (...keys: string[]) => ({ not: { anyOf: keys.map((key) => ({ required: [key] })) } });
   switch (kind) {
     case 'normal':
       return exactlyOneOf('cov', 'deviation');
-    case 'lognormal':
-      return { allOf: [exactlyOneOf('mean', 'median'), exactlyOneOf('cov', 'deviation'), notBoth('median', 'deviation')] };
+    case 'lognormal': {
+      const together = [
+        exactlyOneOf('mean', 'median'),
+        exactlyOneOf('cov', 'deviation'),
+        notBoth('median', 'deviation'),
+      ];
+      return { allOf: together };
+    }
     case 'beta':
       return {
         oneOf: [
-          { required: ['alpha', 'beta'], not: { anyOf: ['mean', 'cov', 'deviation'].map((key) => ({ required: [key] })) } },
-          {
-            required: ['mean'],
-            allOf: [exactlyOneOf('cov', 'deviation')],
-            not: { anyOf: ['alpha', 'beta'].map((key) => ({ required: [key] })) },
-          },
+          { required: ['alpha', 'beta'], ...none('mean', 'cov', 'deviation') },
+          { required: ['mean'], allOf: [exactlyOneOf('cov', 'deviation')], ...none('alpha', 'beta') },
         ],
       };
     default:

@@ -43,7 +43,7 @@ function marchColumn(column: Column, intervals: readonly Interval[]): Track {
     totalBetween(column, start, end, 0, toppedUp, state.settlement, total);
     stepper.startAfresh(total);
     secondary?.afterChange(interval.start, total, state);
-    recorder.record(total);
+    recorder.record(interval.start, total);
 
     // where neither the loads nor their coupling change, neither does the total
     const steady = column.waterHeight === 0 && sameLoads(start, end);
@@ -54,7 +54,7 @@ function marchColumn(column: Column, intervals: readonly Interval[]): Track {
       if (!steady) totalBetween(column, start, end, share, toppedUp, state.settlement, total);
       stepper.advance(total, to - from, steady);
       secondary?.advance(from, to, total, state);
-      recorder.record(total);
+      recorder.record(to, total);
       from = to;
     }
   }

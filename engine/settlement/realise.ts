@@ -8,14 +8,9 @@ import { fillVolumes } from './fillVolumes.ts';
 import { historyTimes } from './historyTimes.ts';
 import { march } from './march.ts';
 import type { Realisations } from './realisations.ts';
-import {
-  dateOfDegree,
-  dateOfSettlementStillToCome,
-  endOfPlacing,
-  RATE_PERIOD,
-  valueAtDate,
-} from './settlementHistory.ts';
+import { dateOfDegree, dateOfSettlementStillToCome, RATE_PERIOD, valueAtDate } from './settlementHistory.ts';
 import { intervalsOf } from './timeGrid.ts';
+import { endOfPlacing } from './track.ts';
 
 /** Cells and steps of everyday work: the accuracy that goes with them is measured in the tests. */
 export const WORKING_RESOLUTION: Resolution = { cells: 60, steps: 16 };

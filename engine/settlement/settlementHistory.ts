@@ -1,5 +1,4 @@
 import { DAYS_PER_YEAR } from '../units.ts';
-import type { Column } from './column.ts';
 import type { Track } from './track.ts';
 import { dateAt, tauAt } from './timeGrid.ts';
 
@@ -101,10 +100,4 @@ function bisect(from: number, to: number, before: (date: number) => boolean): nu
     else high = middle;
   }
   return high;
-}
-
-/** End of the last placing of a lift on the column, years; its time zero where there is none. */
-export function endOfPlacing(column: Column): number {
-  const ends = column.loads.filter((load) => load.kind === 'lift').map((load) => load.period.end);
-  return Math.max(column.timeZero, ...ends);
 }

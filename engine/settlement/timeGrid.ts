@@ -26,9 +26,9 @@ const LEAST_POWER = 2;
 const POWER_AFTER_SUDDEN = 3;
 const MOST_POWER = 4;
 
-/** Steps of an interval of ordinary length; a long one gets more. */
-export const USUAL_STEPS = 8;
-
+/** An interval of more consolidation times than this is cut in two after the next number of them. */
+const LONGEST_WHOLE = 6;
+const FIRST_PART = 4;
 /**
  * Intervals between all dates at which something about the column changes, from its time zero to the
  * horizon: the time grid starts afresh after each.
@@ -53,18 +53,22 @@ export function intervalsOf(column: Column, steps: number, consolidationTime: nu
   const sudden = suddenChanges(column);
   const intervals: Interval[] = [];
   let start = timeZero;
-  for (const end of dates) {
-    if (end - start <= SAME_DATE) continue;
-    const length = end - start;
+  const add = (end: number, time: number) => {
     const previous = intervals.length === 0 ? Infinity : start - intervals[intervals.length - 1].start;
-    const ratio = length / Math.min(consolidationTime, PREVIOUS_LENGTHS * previous);
-    const least = sudden.some((date) => Math.abs(date - start) <= SAME_DATE)
-      ? POWER_AFTER_SUDDEN
-      : LEAST_POWER;
+    const ratio = (end - start) / Math.min(time, PREVIOUS_LENGTHS * previous);
+    const isSudden = sudden.some((date) => Math.abs(date - start) <= SAME_DATE);
+    const least = isSudden ? POWER_AFTER_SUDDEN : LEAST_POWER;
     const power = ratio > 1 ? Math.min(MOST_POWER, least + 0.3 * ln(ratio)) : least;
     const few = ratio < SHORT ? SHARE_OF_STEPS_IN_SHORT : 1;
     intervals.push({ start, end, steps: Math.max(2, Math.round(steps * few * (power - 1))), power });
     start = end;
+  };
+  for (const end of dates) {
+    if (end - start <= SAME_DATE) continue;
+    if (end - start > LONGEST_WHOLE * consolidationTime) {
+      add(start + FIRST_PART * consolidationTime, consolidationTime);
+      add(end, FIRST_PART * consolidationTime);
+    } else add(end, consolidationTime);
   }
   return intervals;
 }

@@ -2,7 +2,7 @@ import { strainAt } from '../ground/compressionLaw.ts';
 import type { Column } from './column.ts';
 import type { ColumnState } from './step.ts';
 import type { TotalStress } from './stressState.ts';
-import type { Interval } from './timeGrid.ts';
+import { SAME_DATE, type Interval } from './timeGrid.ts';
 
 /** Settlement of a column at the knots of its time grid: the start and each step's end of each interval. */
 export interface Track {
@@ -11,7 +11,10 @@ export interface Track {
   readonly settlement: Float64Array;
   /** Secondary part of it, m. */
   readonly secondary: Float64Array;
-  /** Primary settlement over its drained value under the load then acting; empty where not asked for. */
+  /**
+   * Primary settlement over its drained value under the load then acting: 0 before the end of placing, and kept
+   * once the degree asked for is reached; empty where none is asked for.
+   */
   readonly degree: Float64Array;
   /** Thickness of topping up in the end, m. */
   readonly toppedUp: number;
@@ -23,19 +26,29 @@ export interface Track {
   readonly final: ColumnState;
 }
 
+const KNOTS_BEYOND = 2;
+
 /** Writes down a column's settlement knot after knot. */
 export function trackRecorder(column: Column, intervals: readonly Interval[], state: ColumnState) {
   const knots = intervals.reduce((sum, interval) => sum + interval.steps + 1, 0);
   const settlement = new Float64Array(knots);
   const secondary = new Float64Array(knots);
   const degree = new Float64Array(Number.isNaN(column.degree) ? 0 : knots);
+  // it is asked for from the end of placing on, until it is reached
+  const asked = endOfPlacing(column) - SAME_DATE;
+  let knotsReached = 0;
   let knot = 0;
   return {
     /** @param total the total stress at the knot, on which the degree of consolidation depends */
-    record(total: TotalStress): void {
+    record(date: number, total: TotalStress): void {
       settlement[knot] = state.settlement;
       secondary[knot] = column.settlementFactor * state.secondary;
-      if (degree.length > 0) degree[knot] = degreeOfConsolidation(column, total, state);
+      if (degree.length > 0) {
+        // two knots more than needed, so that the curve between knots is not bent where it is read
+        if (knotsReached > KNOTS_BEYOND) degree[knot] = degree[knot - 1];
+        else if (date >= asked) degree[knot] = degreeOfConsolidation(column, total, state);
+        if (degree[knot] >= column.degree) knotsReached += 1;
+      }
       knot += 1;
     },
     finished: (toppedUp: number, notClosed: number): Track => ({
@@ -75,4 +88,10 @@ function extremes(column: Column, state: ColumnState) {
     if (volume > 0) leastVoidRatio = Math.min(leastVoidRatio, volume * (1 - strain) - 1);
   }
   return { largestStrain, leastVoidRatio };
+}
+
+/** End of the last placing of a lift on the column, years; its time zero where there is none. */
+export function endOfPlacing(column: Column): number {
+  const ends = column.loads.filter((load) => load.kind === 'lift').map((load) => load.period.end);
+  return Math.max(column.timeZero, ...ends);
 }

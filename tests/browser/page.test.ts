@@ -5,17 +5,13 @@ import { tableAsCsv } from '../../web/chart/dataTable.ts';
 import { exceedanceTable } from '../../web/risk/exceedanceTable.ts';
 import { buildAndServePage, type BuiltPage } from './builtPage.ts';
 import { openChromium } from './openChromium.ts';
+import { smallProject } from './smallProject.ts';
 import { studyInNode } from './studyInNode.ts';
 
 const demo = readFileSync(new URL('../../public/demo/approach-embankment.json', import.meta.url), 'utf8');
 
-/** The demo with another name and so many realisations, as a file to open. */
-function projectFile(name: string, realisations: number) {
-  const project = JSON.parse(demo);
-  project.name = name;
-  project.sampling.realisations = realisations;
-  return jsonFile('other.json', JSON.stringify(project));
-}
+const projectFile = (name: string, realisations: number) =>
+  jsonFile('other.json', JSON.stringify(smallProject(name, realisations)));
 
 const jsonFile = (name: string, text: string) => ({
   name,
@@ -45,7 +41,7 @@ afterAll(async () => {
   await built?.close();
 });
 
-const heading = () => page.getByRole('heading', { level: 1 });
+const heading = (name?: string) => page.getByRole('heading', { level: 1, name });
 const open = (file: ReturnType<typeof jsonFile>) => page.locator('input[type=file]').setInputFiles(file);
 const done = (realisations: string) =>
   page
@@ -73,7 +69,7 @@ describe('the built page, below a sub-path', () => {
   it('opens another file and answers for it with the same bytes as Node', async () => {
     const file = projectFile('Second crossing', 1000);
     await open(file);
-    expect(await heading().textContent()).toBe('Second crossing');
+    await heading('Second crossing').waitFor();
     await done('1,000');
     const summary = studyInNode(file.buffer.toString('utf8'));
     const result = summary.quantities[summary.limits[0].quantity];
@@ -114,9 +110,7 @@ describe('the built page, below a sub-path', () => {
   });
 
   it('takes a file that is dropped on it', async () => {
-    const project = JSON.parse(demo);
-    project.name = 'Dropped <b>project</b>';
-    project.sampling.realisations = 200;
+    const project = smallProject('Dropped <b>project</b>', 200);
     await page.evaluate((text) => {
       const carried = new DataTransfer();
       carried.items.add(new File([text], 'dropped.json', { type: 'application/json' }));

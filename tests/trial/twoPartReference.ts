@@ -1,5 +1,5 @@
 /**
- * Slow elementary functions in two parts of 53 bits each (good to about 1e-29), as the yardstick for a million
+ * Slow elementary functions in two parts of 53 bits each (good to 1e-22 and better), as the yardstick for a million
  * arguments. They share no coefficient and no reduction with the engine's, start from nothing but Taylor's sums
  * and Newton's steps, and are themselves held against decimal.js.
  */

@@ -2,7 +2,7 @@ import type { ExceedanceCurve, QuantitySummary } from '../../engine/summary/summ
 import type { ChartPicture, Mark } from '../chart/chartPicture.ts';
 import { niceCeiling } from '../chart/niceAxis.ts';
 import { axisUnit, tickText, type AxisUnit } from '../words/axisUnit.ts';
-import { capital } from '../words/findingText.ts';
+import { capital, type BandedValue } from '../words/findingText.ts';
 import { limitMeasure, measureText } from '../words/measure.ts';
 import { quantityName } from '../words/quantityName.ts';
 
@@ -10,6 +10,8 @@ import { quantityName } from '../words/quantityName.ts';
 export interface CurveLimit {
   readonly name: string;
   readonly value: number;
+  /** Chance of passing it, 0–1, with its band. */
+  readonly chance: BandedValue;
 }
 
 /** The exceedance curve with its band, the unresolved tail drawn apart, and the limits as upright lines. */
@@ -80,16 +82,45 @@ export function exceedanceAxis(
   return { from, to, ...axisUnit(quantity.unit, to) };
 }
 
-/** Share of realisations above a value with its band, read off the curve's steps. */
-export function readExceedance(
-  curve: ExceedanceCurve,
-  value: number,
-): { share: number; low: number; high: number } {
+/**
+ * Share of realisations above a value with its band. A curve with a point for each realisation is read off its
+ * steps; one that was thinned, straight between its points.
+ *
+ * @param realisations behind the curve
+ */
+export function readExceedance(curve: ExceedanceCurve, value: number, realisations: number) {
+  const { values, shares, low, high } = curve;
   let step = -1;
-  while (step + 1 < curve.values.length && curve.values[step + 1] <= value) step += 1;
-  return step < 0
-    ? { share: 1, low: NaN, high: NaN }
-    : { share: curve.shares[step], low: curve.low[step], high: curve.high[step] };
+  while (step + 1 < values.length && values[step + 1] <= value) step += 1;
+  if (step < 0) return { share: 1, low: NaN, high: NaN };
+  const isThinned = realisations > values.length && step + 1 < values.length;
+  const along = isThinned ? (value - values[step]) / (values[step + 1] - values[step]) : 0;
+  const read = (list: readonly number[]) =>
+    along > 0 ? list[step] + along * (list[step + 1] - list[step]) : list[step];
+  return { share: read(shares), low: read(low), high: read(high) };
+}
+
+/** The curve with the chance of passing each limit as a point of its own, which thinning may have left out. */
+export function withLimits(curve: ExceedanceCurve, limits: readonly CurveLimit[]): ExceedanceCurve {
+  const points = curve.values.map((value, i) => ({
+    value,
+    share: curve.shares[i],
+    low: curve.low[i],
+    high: curve.high[i],
+  }));
+  for (const { value, chance } of limits) {
+    if (curve.values.includes(value)) continue;
+    const place = points.findIndex((point) => point.value > value);
+    if (place > 0)
+      points.splice(place, 0, { value, share: chance.value, low: chance.low, high: chance.high });
+  }
+  return {
+    ...curve,
+    values: points.map((point) => point.value),
+    shares: points.map((point) => point.share),
+    low: points.map((point) => point.low),
+    high: points.map((point) => point.high),
+  };
 }
 
 function valueRange(curve: ExceedanceCurve, limits: readonly CurveLimit[]): { from: number; to: number } {

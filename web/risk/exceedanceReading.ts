@@ -9,7 +9,7 @@ export function exceedanceReading(
   value: number,
   of: number,
 ): string {
-  const { share, low, high } = readExceedance(exceedance, value);
+  const { share, low, high } = readExceedance(exceedance, value, of);
   const chance = { value: share, low, high, above: Math.round(share * of), of };
   const band = chanceBandText(chance);
   const tail =

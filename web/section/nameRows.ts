@@ -5,7 +5,7 @@ export interface NamePlace {
 }
 
 /**
- * Puts names above their marks, from left to right in the lowest row of two that keeps them apart; a name near an edge is moved inside.
+ * Puts names above their marks, from left to right in the lowest of three rows that keeps them apart; a name near an edge is moved inside.
  *
  * @param marks middle and width of each name, px
  * @param width of the drawing, px
@@ -28,4 +28,4 @@ export function nameRows(
   return places;
 }
 
-const ROWS = 2;
+const ROWS = 3;

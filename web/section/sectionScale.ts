@@ -4,6 +4,8 @@ import type { SectionShape } from './sectionShape.ts';
 export interface SectionScale {
   readonly width: number;
   readonly height: number;
+  /** Where the highest thing drawn lies, px from above. */
+  readonly top: number;
   /** Pixels for a metre along the section; a metre of height is `exaggeration` times as long. */
   readonly pixelsPerMetre: number;
   /** 1 where the drawing is true to scale. */
@@ -12,20 +14,27 @@ export interface SectionScale {
   readonly y: (height: number) => number;
 }
 
-/** Room around the drawing for depths on the left, names above and positions below, px. */
-export const MARGINS = { left: 44, right: 16, top: 62, bottom: 40 } as const;
+/** Room around the drawing for depths on the left and positions below, px. */
+export const MARGINS = { left: 44, right: 16, bottom: 40 } as const;
+
+/** Room above the drawing for the arrows of loads and so many rows of names, px. */
+export function roomAbove(rows: number): number {
+  return 30 + 16 * Math.max(rows, 1);
+}
 
 /**
  * Lays the section into a frame. True to scale where its height then lies between the two; a section so long
  * that it would be lower than `lowest` is stretched upwards by the least of 1.5, 2, 2.5, 3, 4, 5, 6, 8, 10, 15 or 20 that reaches it.
  *
  * @param width of the frame, px
+ * @param top room above the drawing, px
  */
 export function sectionScale(
   shape: SectionShape,
   width: number,
   lowest: number,
   highest: number,
+  top: number,
 ): SectionScale {
   const inner = Math.max(60, width - MARGINS.left - MARGINS.right);
   const rise = Math.max(shape.top - shape.base, 1e-3);
@@ -37,11 +46,12 @@ export function sectionScale(
   const left = MARGINS.left + (inner - run * pixelsPerMetre) / 2;
   return {
     width,
-    height: drawn + MARGINS.top + MARGINS.bottom,
+    height: drawn + top + MARGINS.bottom,
+    top,
     pixelsPerMetre,
     exaggeration,
     x: (metres) => left + (metres - shape.from) * pixelsPerMetre,
-    y: (height) => MARGINS.top + (shape.top - height) * pixelsPerMetre * exaggeration,
+    y: (height) => top + (shape.top - height) * pixelsPerMetre * exaggeration,
   };
 }
 

@@ -37,7 +37,7 @@ const lowModeHigh = fc
 const families: Readonly<Record<string, fc.Arbitrary<Marginal>>> = {
   normal: fc.tuple(number(-50, 50), width).map(([m, d]) => valid(makeNormal({ mean: m, deviation: d }))),
   'normal, cut': fc
-    .tuple(number(-50, 50), width, number(-3, 2.5), number(0.05, 4))
+    .tuple(number(-50, 50), width, number(-2.5, 2.4), number(0.1, 4))
     .map(([m, d, from, wide]) =>
       valid(makeNormal({ mean: m, deviation: d, low: m + from * d, high: m + (from + wide) * d })),
     ),
@@ -86,13 +86,14 @@ function momentsByQuadrature(marginal: Marginal): readonly [number, number] {
 }
 
 describe.each(Object.entries(families))('a %s distribution', (_, family) => {
-  it('has F(F⁻¹(p)) = p to 1e-10', () => {
+  it('has F(F⁻¹(p)) = p to 1e-12, as far as rounding x allows', () => {
     fc.assert(
       fc.property(family, number(1e-6, 1 - 1e-6), (marginal, p) => {
         const x = quantile(marginal, p);
-        // rounding x moves F by the density times a last place of x
-        const slack = density(marginal, x) * Math.abs(x) * 1e-15;
-        expect(Math.abs(cumulative(marginal, x) - p)).toBeLessThan(1e-10 + slack);
+        // rounding x and its distance from the other limit may move it by a few last places
+        const step = 1e-15 * Math.max(...[x, mean(marginal), deviation(marginal)].map(Math.abs));
+        expect(cumulative(marginal, x - step)).toBeLessThan(p + 1e-12);
+        expect(cumulative(marginal, x + step)).toBeGreaterThan(p - 1e-12);
       }),
       { seed, numRuns: 300 },
     );
@@ -177,7 +178,8 @@ describe('limits and moments', () => {
           makeNormal({ mean: mode, deviation: high - low, low, high }),
           makeTable({ values: [low, high], cumulative: [0, 1] }),
         ]) {
-          expect(limits(valid(made))).toEqual({ low, high });
+          const found = limits(valid(made));
+          expect(found.low === low && found.high === high).toBe(true);
         }
       }),
       { seed },

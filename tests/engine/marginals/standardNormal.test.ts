@@ -17,14 +17,12 @@ describe('the standard normal distribution', () => {
     );
   });
 
-  // the looser of the two is @stdlib: a few 1e-13 about p = 1e-5, where ours meets Φ to 1e-15 (below)
-  it('Φ⁻¹ agrees with @stdlib to 1e-12 of its value from 1e-15 on', () => {
+  // further out @stdlib's own error grows (1e-12 at 4e-7, all digits by 1e-20); the tests below go there
+  it('Φ⁻¹ agrees with @stdlib to 1e-13 from 1e-4 to 1 − 1e-4', () => {
     fc.assert(
-      fc.property(fc.double({ min: -15, max: 0, noNaN: true }), fc.boolean(), (power, isUpper) => {
-        const p = isUpper ? 1 - 10 ** power / 2 : 10 ** power / 2;
-        fc.pre(p > 0 && p < 1);
+      fc.property(fc.double({ min: 1e-4, max: 1 - 1e-4, noNaN: true }), (p) => {
         const wanted = quantile(p, 0, 1);
-        expect(Math.abs(normalQuantile(p) - wanted)).toBeLessThan(1e-12 * Math.max(1, Math.abs(wanted)));
+        expect(Math.abs(normalQuantile(p) - wanted)).toBeLessThan(1e-13 * Math.max(1, Math.abs(wanted)));
       }),
       { seed, numRuns: 3000 },
     );

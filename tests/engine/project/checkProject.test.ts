@@ -24,7 +24,13 @@ function changed(change: (project: Json) => void, start: Json = plainProject()):
 }
 
 /** Refusals that are one fault at one place. */
-function refuses(title: string, pointer: string, right: RegExp, change: (project: Json) => void, start?: () => Json) {
+function refuses(
+  title: string,
+  pointer: string,
+  right: RegExp,
+  change: (project: Json) => void,
+  start?: () => Json,
+) {
   it(`refuses ${title}`, () => {
     const faults = changed(change, start?.());
     expect(faults.map((fault) => fault.pointer)).toEqual([pointer]);
@@ -72,7 +78,9 @@ describe('a project that is right', () => {
     const renamed = fullProject();
     renamed.soils[0].name = 'grey clay';
     renamed.layers[1].soil = 'grey clay';
-    expect(modelOf(renamed).inputs.map(({ name }) => name)).toEqual(modelOf(fullProject()).inputs.map(({ name }) => name));
+    expect(modelOf(renamed).inputs.map(({ name }) => name)).toEqual(
+      modelOf(fullProject()).inputs.map(({ name }) => name),
+    );
   });
 
   it('may start with a byte-order mark', () => {
@@ -129,7 +137,10 @@ describe('a text that is no project', () => {
   it('is refused by name where its version is newer', () => {
     const faults = changed((project) => (project.version = 2));
     expect(faults).toHaveLength(1);
-    expect(faults[0]).toMatchObject({ pointer: '/version', found: 'version 2, which is newer than this program' });
+    expect(faults[0]).toMatchObject({
+      pointer: '/version',
+      found: 'version 2, which is newer than this program',
+    });
   });
 
   refuses('another format', '/format', /slow-ground-project/, (project) => (project.format = 'other'));
@@ -151,129 +162,354 @@ describe('keys', () => {
   });
 
   it('refuses __proto__ and constructor like any other strange key, and takes nothing from them', () => {
-    const text = JSON.stringify(plainProject()).replace('{', '{"__proto__":{"drains":{"foot_m":3}},"constructor":1,');
+    const text = JSON.stringify(plainProject()).replace(
+      '{',
+      '{"__proto__":{"drains":{"foot_m":3}},"constructor":1,',
+    );
     expect(faultsOf(text).map(({ pointer }) => pointer)).toEqual(['/__proto__', '/constructor']);
     expect(({} as Json).drains).toBeUndefined();
   });
 
   it('refuses a key that stands twice in one object', () => {
-    const text = JSON.stringify(plainProject()).replace('"compression_index":', '"compression_index":0.5,"compression_index":');
+    const text = JSON.stringify(plainProject()).replace(
+      '"compression_index":',
+      '"compression_index":0.5,"compression_index":',
+    );
     expect(faultsOf(text).map(({ pointer }) => pointer)).toEqual(['/soils/0/compression_index']);
   });
 
   refuses('null', '/notes', /text/, (project) => (project.notes = null));
-  refuses('both ways of giving Cr', '/soils/0', /exactly one/, (project) => (project.soils[0].recompression_index = 0.05));
-  refuses('a layer without a thickness', '/layers/0', /exactly one/, (project) => delete project.layers[0].thickness_m);
+  refuses(
+    'both ways of giving Cr',
+    '/soils/0',
+    /exactly one/,
+    (project) => (project.soils[0].recompression_index = 0.05),
+  );
+  refuses(
+    'a layer without a thickness',
+    '/layers/0',
+    /exactly one/,
+    (project) => delete project.layers[0].thickness_m,
+  );
 });
 
 describe('numbers', () => {
   const unitWeight = '/soils/0/unit_weight_kN_m3';
-  refuses('text for a number', unitWeight, /a number/, (project) => (project.soils[0].unit_weight_kN_m3 = '16'));
+  refuses(
+    'text for a number',
+    unitWeight,
+    /a number/,
+    (project) => (project.soils[0].unit_weight_kN_m3 = '16'),
+  );
   it('refuses 1e999', () => {
-    const faults = faultsOf(JSON.stringify(plainProject()).replace('"unit_weight_kN_m3":16', '"unit_weight_kN_m3":1e999'));
-    expect(faults.map(({ pointer, found }) => [pointer, found])).toEqual([[unitWeight, 'a number too large to hold']]);
+    const faults = faultsOf(
+      JSON.stringify(plainProject()).replace('"unit_weight_kN_m3":16', '"unit_weight_kN_m3":1e999'),
+    );
+    expect(faults.map(({ pointer, found }) => [pointer, found])).toEqual([
+      [unitWeight, 'a number too large to hold'],
+    ]);
   });
   it('refuses a thickness of -0', () => {
     const faults = faultsOf(JSON.stringify(plainProject()).replace('"thickness_m":5', '"thickness_m":-0'));
-    expect(faults.map(({ pointer, found }) => [pointer, found])).toEqual([['/layers/0/thickness_m', 'the number -0']]);
+    expect(faults.map(({ pointer, found }) => [pointer, found])).toEqual([
+      ['/layers/0/thickness_m', 'the number -0'],
+    ]);
   });
-  refuses('a negative thickness', '/layers/0/thickness_m', /above 0/, (project) => (project.layers[0].thickness_m = -5));
-  refuses('a unit weight below that of water', unitWeight, /from 9.81/, (project) => (project.soils[0].unit_weight_kN_m3 = 9));
-  refuses('a void ratio of 0', '/soils/0/initial_void_ratio', /above 0/, (project) => (project.soils[0].initial_void_ratio = 0));
-  refuses('a central Cr/Cc of 1', '/soils/0/recompression_ratio', /below 1/, (project) => (project.soils[0].recompression_ratio = 1));
-  refuses('a central Cr as large as Cc', '/soils/0/recompression_index', /below that of the compression index/, (project) => {
-    delete project.soils[0].recompression_ratio;
-    project.soils[0].compression_index = 0.5;
-    project.soils[0].recompression_index = { marginal: 'uniform', low: 0.4, high: 0.6 };
-  });
-  refuses('a central OCR below 1', '/soils/0/preconsolidation/ocr', /from 1/, (project) => (project.soils[0].preconsolidation.ocr = 0.9));
+  refuses(
+    'a negative thickness',
+    '/layers/0/thickness_m',
+    /above 0/,
+    (project) => (project.layers[0].thickness_m = -5),
+  );
+  refuses(
+    'a unit weight below that of water',
+    unitWeight,
+    /from 9.81/,
+    (project) => (project.soils[0].unit_weight_kN_m3 = 9),
+  );
+  refuses(
+    'a void ratio of 0',
+    '/soils/0/initial_void_ratio',
+    /above 0/,
+    (project) => (project.soils[0].initial_void_ratio = 0),
+  );
+  refuses(
+    'a central Cr/Cc of 1',
+    '/soils/0/recompression_ratio',
+    /below 1/,
+    (project) => (project.soils[0].recompression_ratio = 1),
+  );
+  refuses(
+    'a central Cr as large as Cc',
+    '/soils/0/recompression_index',
+    /below that of the compression index/,
+    (project) => {
+      delete project.soils[0].recompression_ratio;
+      project.soils[0].compression_index = 0.5;
+      project.soils[0].recompression_index = { marginal: 'uniform', low: 0.4, high: 0.6 };
+    },
+  );
+  refuses(
+    'a central OCR below 1',
+    '/soils/0/preconsolidation/ocr',
+    /from 1/,
+    (project) => (project.soils[0].preconsolidation.ocr = 0.9),
+  );
   refuses('a median OCR below 1', '/soils/0/preconsolidation/ocr', /median from 1/, (project) => {
     project.soils[0].preconsolidation.ocr = { marginal: 'uniform', low: 0.8, high: 1.1 };
   });
   it('takes an OCR whose tail is below 1', () => {
-    expect(changed((project) => (project.soils[0].preconsolidation.ocr = { marginal: 'uniform', low: 0.9, high: 1.6 }))).toEqual([]);
+    expect(
+      changed(
+        (project) => (project.soils[0].preconsolidation.ocr = { marginal: 'uniform', low: 0.9, high: 1.6 }),
+      ),
+    ).toEqual([]);
   });
 });
 
 describe('marginals', () => {
   const at = '/soils/0/compression_index';
   const put = (marginal: Json) => (project: Json) => (project.soils[0].compression_index = marginal);
-  refuses('low above best', at, /best must lie from low to high/, put({ marginal: 'triangular', low: 0.7, best: 0.6, high: 0.9 }));
-  refuses('best above high', at, /best must lie from low to high/, put({ marginal: 'pert', low: 0.2, best: 0.6, high: 0.5 }));
-  refuses('a deviation of 0', `${at}/deviation`, /above 0/, put({ marginal: 'normal', mean: 0.6, deviation: 0 }));
+  refuses(
+    'low above best',
+    at,
+    /best must lie from low to high/,
+    put({ marginal: 'triangular', low: 0.7, best: 0.6, high: 0.9 }),
+  );
+  refuses(
+    'best above high',
+    at,
+    /best must lie from low to high/,
+    put({ marginal: 'pert', low: 0.2, best: 0.6, high: 0.5 }),
+  );
+  refuses(
+    'a deviation of 0',
+    `${at}/deviation`,
+    /above 0/,
+    put({ marginal: 'normal', mean: 0.6, deviation: 0 }),
+  );
   refuses('a cov below 0', `${at}/cov`, /above 0/, put({ marginal: 'lognormal', mean: 0.6, cov: -0.1 }));
-  refuses('a table that falls', at, /must not fall/, put({ marginal: 'table', values: [0.3, 0.5, 0.6, 0.8], cumulative: [0, 0.6, 0.5, 1] }));
-  refuses('a share above 1 in a table', `${at}/cumulative/1`, /from 0 to 1/, put({ marginal: 'table', values: [0.3, 0.5, 0.8], cumulative: [0, 1.5, 1] }));
-  refuses('a kind that is not known', `${at}/marginal`, /"lognormal"/, put({ marginal: 'lognorml', mean: 0.6, cov: 0.2 }));
-  refuses('mean, cov and deviation together', at, /exactly one/, put({ marginal: 'normal', mean: 0.6, cov: 0.1, deviation: 0.1 }));
-  refuses('a normal that reaches below 0 without a low', at, /give it a "low"/, put({ marginal: 'normal', mean: 0.6, cov: 0.4 }));
+  refuses(
+    'a table that falls',
+    at,
+    /must not fall/,
+    put({ marginal: 'table', values: [0.3, 0.5, 0.6, 0.8], cumulative: [0, 0.6, 0.5, 1] }),
+  );
+  refuses(
+    'a share above 1 in a table',
+    `${at}/cumulative/1`,
+    /from 0 to 1/,
+    put({ marginal: 'table', values: [0.3, 0.5, 0.8], cumulative: [0, 1.5, 1] }),
+  );
+  refuses(
+    'a kind that is not known',
+    `${at}/marginal`,
+    /"lognormal"/,
+    put({ marginal: 'lognorml', mean: 0.6, cov: 0.2 }),
+  );
+  refuses(
+    'mean, cov and deviation together',
+    at,
+    /exactly one/,
+    put({ marginal: 'normal', mean: 0.6, cov: 0.1, deviation: 0.1 }),
+  );
+  refuses(
+    'a normal that reaches below 0 without a low',
+    at,
+    /give it a "low"/,
+    put({ marginal: 'normal', mean: 0.6, cov: 0.4 }),
+  );
   it('takes that normal with a low', () => {
     expect(changed(put({ marginal: 'normal', mean: 0.6, cov: 0.4, low: 0.1 }))).toEqual([]);
   });
-  refuses('a uniform that starts at 0 for what must be above 0', `${at}/low`, /above 0/, put({ marginal: 'uniform', low: 0, high: 0.6 }));
-  refuses('a share of variance above 1', `${at}/varies/share_of_variance`, /at most 1/, put({
-    marginal: 'lognormal',
-    mean: 0.6,
-    cov: 0.2,
-    varies: { share_of_variance: 1.2, vertical_scale_m: 1, horizontal_scale_m: 30 },
-  }));
-  refuses('a date that varies along the section', '/fill/lifts/0/placing/end_year/varies', /none here/, (project) => {
-    project.fill.lifts[0].placing.end_year = {
-      marginal: 'uniform',
-      low: 0.3,
-      high: 0.4,
-      varies: { share_of_variance: 0.5, horizontal_scale_m: 30 },
-    };
-  });
-  refuses('a factor on thickness with another median than 1', '/layers/1/thickness_factor', /median from 0.999999/, (project) => {
-    project.layers[1].thickness_factor = { marginal: 'lognormal', mean: 1, cov: 0.2 };
-  }, fullProject);
-  refuses('a model factor that is not lognormal', '/model_factors/rate/marginal', /"lognormal" or "fixed"/, (project) => {
-    project.model_factors.rate = { marginal: 'uniform', low: 0.5, high: 1.5 };
-  }, fullProject);
-  refuses('a smear below 1, which is smaller than the drain', '/drains/smear_ratio', /from 1/, (project) => {
-    project.drains.smear_ratio = 0.8;
-  }, fullProject);
+  refuses(
+    'a uniform that starts at 0 for what must be above 0',
+    `${at}/low`,
+    /above 0/,
+    put({ marginal: 'uniform', low: 0, high: 0.6 }),
+  );
+  refuses(
+    'a share of variance above 1',
+    `${at}/varies/share_of_variance`,
+    /at most 1/,
+    put({
+      marginal: 'lognormal',
+      mean: 0.6,
+      cov: 0.2,
+      varies: { share_of_variance: 1.2, vertical_scale_m: 1, horizontal_scale_m: 30 },
+    }),
+  );
+  refuses(
+    'a date that varies along the section',
+    '/fill/lifts/0/placing/end_year/varies',
+    /none here/,
+    (project) => {
+      project.fill.lifts[0].placing.end_year = {
+        marginal: 'uniform',
+        low: 0.3,
+        high: 0.4,
+        varies: { share_of_variance: 0.5, horizontal_scale_m: 30 },
+      };
+    },
+  );
+  refuses(
+    'a factor on thickness with another median than 1',
+    '/layers/1/thickness_factor',
+    /median from 0.999999/,
+    (project) => {
+      project.layers[1].thickness_factor = { marginal: 'lognormal', mean: 1, cov: 0.2 };
+    },
+    fullProject,
+  );
+  refuses(
+    'a model factor that is not lognormal',
+    '/model_factors/rate/marginal',
+    /"lognormal" or "fixed"/,
+    (project) => {
+      project.model_factors.rate = { marginal: 'uniform', low: 0.5, high: 1.5 };
+    },
+    fullProject,
+  );
+  refuses(
+    'a smear below 1, which is smaller than the drain',
+    '/drains/smear_ratio',
+    /from 1/,
+    (project) => {
+      project.drains.smear_ratio = 0.8;
+    },
+    fullProject,
+  );
 });
 
 describe('what stands beside each other', () => {
-  refuses('a removal before its placing', '/fill/lifts/1/removal/start_year', /not before the end of its placing/, (project) => {
-    project.fill.lifts[1].removal = { start_year: 0.1, end_year: 1.6 };
-  }, fullProject);
-  refuses('a placing that ends before it starts', '/fill/lifts/0/placing/end_year', /not before its start/, (project) => {
-    project.fill.lifts[0].placing = { start_year: 0.5, end_year: 0.3 };
-  });
-  refuses('two layers named alike', '/layers/1/name', /no other layer/, (project) => (project.layers[1].name = 'upper clay'));
-  refuses('two soils with one id', '/soils/1/id', /id of its own/, (project) => (project.soils[1].id = 'clay'));
-  refuses('a soil that is not there, with the nearest', '/layers/0/soil', /^"clay"$/, (project) => (project.layers[0].soil = 'cley'));
-  refuses('an output time beyond the horizon', '/times/output_years/1', /up to the horizon, 30/, (project) => {
-    project.times.output_years = [1, 31];
-  });
-  refuses('output times that do not rise', '/times/output_years/1', /rise/, (project) => (project.times.output_years = [2, 1]));
-  refuses('a handover at the horizon', '/times/handover_year', /before the horizon/, (project) => (project.times.handover_year = 30));
-  refuses('drains that reach below the ground', '/drains/foot_m', /within the layers/, (project) => {
-    project.drains.foot_m = 40;
-    delete project.vacuum;
-  }, fullProject);
-  refuses('drains under vacuum that cross an inner free-draining layer', '/drains/foot_m', /end above it/, (project) => {
-    project.layers[2].soil = 'sand';
-  }, fullProject);
-  refuses('a smeared zone wider than the ground that a drain serves', '/drains/smear_ratio', /within the ground/, (project) => {
-    project.drains.smear_ratio = 40;
-  }, fullProject);
-  refuses('a standing lift on one that is placed', '/fill/lifts/1/standing', /standing lifts first/, (project) => {
-    project.fill.lifts.reverse();
-  }, fullProject);
-  refuses('the slope of two points at one x', '/limits/4/result', /a step has no slope/, (project) => {
-    project.points[1].x_m = 0;
-  }, fullProject);
-  refuses('a limit of a pair for the result of a point', '/limits/0/pair', /"point" and "limit_mm"/, (project) => {
-    project.limits[0].pair = 'to the pier';
-  }, fullProject);
-  refuses('realisations that are no multiple of 100', '/sampling/realisations', /multiple of 100/, (project) => (project.sampling.realisations = 150));
-  refuses('more than a million realisations', '/sampling/realisations', /to 1000000/, (project) => (project.sampling.realisations = 1_000_100));
+  refuses(
+    'a removal before its placing',
+    '/fill/lifts/1/removal/start_year',
+    /not before the end of its placing/,
+    (project) => {
+      project.fill.lifts[1].removal = { start_year: 0.1, end_year: 1.6 };
+    },
+    fullProject,
+  );
+  refuses(
+    'a placing that ends before it starts',
+    '/fill/lifts/0/placing/end_year',
+    /not before its start/,
+    (project) => {
+      project.fill.lifts[0].placing = { start_year: 0.5, end_year: 0.3 };
+    },
+  );
+  refuses(
+    'two layers named alike',
+    '/layers/1/name',
+    /no other layer/,
+    (project) => (project.layers[1].name = 'upper clay'),
+  );
+  refuses(
+    'two soils with one id',
+    '/soils/1/id',
+    /id of its own/,
+    (project) => (project.soils[1].id = 'clay'),
+  );
+  refuses(
+    'a soil that is not there, with the nearest',
+    '/layers/0/soil',
+    /^"clay"$/,
+    (project) => (project.layers[0].soil = 'cley'),
+  );
+  refuses(
+    'an output time beyond the horizon',
+    '/times/output_years/1',
+    /up to the horizon, 30/,
+    (project) => {
+      project.times.output_years = [1, 31];
+    },
+  );
+  refuses(
+    'output times that do not rise',
+    '/times/output_years/1',
+    /rise/,
+    (project) => (project.times.output_years = [2, 1]),
+  );
+  refuses(
+    'a handover at the horizon',
+    '/times/handover_year',
+    /before the horizon/,
+    (project) => (project.times.handover_year = 30),
+  );
+  refuses(
+    'drains that reach below the ground',
+    '/drains/foot_m',
+    /within the layers/,
+    (project) => {
+      project.drains.foot_m = 40;
+      delete project.vacuum;
+    },
+    fullProject,
+  );
+  refuses(
+    'drains under vacuum that cross an inner free-draining layer',
+    '/drains/foot_m',
+    /end above it/,
+    (project) => {
+      project.layers[2].soil = 'sand';
+    },
+    fullProject,
+  );
+  refuses(
+    'a smeared zone wider than the ground that a drain serves',
+    '/drains/smear_ratio',
+    /within the ground/,
+    (project) => {
+      project.drains.smear_ratio = 40;
+    },
+    fullProject,
+  );
+  refuses(
+    'a standing lift on one that is placed',
+    '/fill/lifts/1/standing',
+    /standing lifts first/,
+    (project) => {
+      project.fill.lifts.reverse();
+    },
+    fullProject,
+  );
+  refuses(
+    'the slope of two points at one x',
+    '/limits/4/result',
+    /a step has no slope/,
+    (project) => {
+      project.points[1].x_m = 0;
+    },
+    fullProject,
+  );
+  refuses(
+    'a limit of a pair for the result of a point',
+    '/limits/0/pair',
+    /"point" and "limit_mm"/,
+    (project) => {
+      project.limits[0].pair = 'to the pier';
+    },
+    fullProject,
+  );
+  refuses(
+    'realisations that are no multiple of 100',
+    '/sampling/realisations',
+    /multiple of 100/,
+    (project) => (project.sampling.realisations = 150),
+  );
+  refuses(
+    'more than a million realisations',
+    '/sampling/realisations',
+    /to 1000000/,
+    (project) => (project.sampling.realisations = 1_000_100),
+  );
   refuses('more than 50 layers', '/layers', /1 to 50/, (project) => {
-    project.layers = Array.from({ length: 51 }, (_, i) => ({ name: `layer ${i}`, soil: 'clay', thickness_m: 1 }));
+    project.layers = Array.from({ length: 51 }, (_, i) => ({
+      name: `layer ${i}`,
+      soil: 'clay',
+      thickness_m: 1,
+    }));
   });
   refuses('more than 200 points', '/points', /1 to 200/, (project) => {
     project.points = Array.from({ length: 201 }, (_, i) => ({ name: `point ${i}`, x_m: i }));
@@ -317,14 +553,18 @@ describe('faults', () => {
 describe('remarks', () => {
   const remarks = (change: (project: Json) => void, start: Json = plainProject()) => {
     change(start);
-    return modelOf(start).remarks.map(({ sentence }) => sentence).join(' ');
+    return modelOf(start)
+      .remarks.map(({ sentence }) => sentence)
+      .join(' ');
   };
 
   it('say that no layer is compressible', () => {
     expect(remarks((project) => (project.layers[0].soil = 'sand'))).toContain('No layer is compressible');
   });
   it('say that handover lies before a placing ends', () => {
-    expect(remarks((project) => (project.times.handover_year = 0.2))).toContain('before the placing of "bank" ends');
+    expect(remarks((project) => (project.times.handover_year = 0.2))).toContain(
+      'before the placing of "bank" ends',
+    );
   });
   it('say that drains lead nowhere', () => {
     const project = fullProject();
@@ -334,7 +574,9 @@ describe('remarks', () => {
   it('say that a coefficient of variation is above 1, and where', () => {
     const project = plainProject();
     project.soils[0].consolidation.cv_m2_per_year.cov = 1.4;
-    const remark = modelOf(project).remarks.find(({ sentence }) => sentence.includes('coefficient of variation'));
+    const remark = modelOf(project).remarks.find(({ sentence }) =>
+      sentence.includes('coefficient of variation'),
+    );
     expect(remark?.pointer).toBe('/soils/0/consolidation/cv_m2_per_year');
   });
   it('say that too few realisations bear no band', () => {

@@ -6,7 +6,10 @@ import {
   isPositiveDefinite,
   linkedTo,
 } from '../../../engine/project/correlationMatrix.ts';
-import { nearestCorrelationMatrix, nearestRankCorrelations } from '../../../engine/project/nearestCorrelation.ts';
+import {
+  nearestCorrelationMatrix,
+  nearestRankCorrelations,
+} from '../../../engine/project/nearestCorrelation.ts';
 import { symmetricEigen } from '../../../engine/project/symmetricEigen.ts';
 import { plainProject } from './plainProject.ts';
 
@@ -56,11 +59,16 @@ describe('the pair that breaks a matrix', () => {
 
 describe('the eigenvalues of a symmetric matrix', () => {
   it('and their vectors give the matrix back', () => {
-    const matrix = Array.from({ length: 7 }, (_, i) => Array.from({ length: 7 }, (_, j) => Math.cos(i * j + i + j)));
+    const matrix = Array.from({ length: 7 }, (_, i) =>
+      Array.from({ length: 7 }, (_, j) => Math.cos(i * j + i + j)),
+    );
     const { values, vectors } = symmetricEigen(matrix);
     matrix.forEach((row, i) =>
       row.forEach((value, j) => {
-        const sum = values.reduce((part, eigenvalue, k) => part + eigenvalue * vectors[i][k] * vectors[j][k], 0);
+        const sum = values.reduce(
+          (part, eigenvalue, k) => part + eigenvalue * vectors[i][k] * vectors[j][k],
+          0,
+        );
         expect(sum).toBeCloseTo(value, 12);
       }),
     );
@@ -70,14 +78,25 @@ describe('the eigenvalues of a symmetric matrix', () => {
 describe('the nearest correlation matrix', () => {
   // Higham (2002), section 4: [1 1 0; 1 1 1; 0 1 1] → 1, 0.7607, 0.1573, printed to four digits (value from memory)
   it('is that of the published example', () => {
-    const nearest = nearestCorrelationMatrix([[1, 1, 0], [1, 1, 1], [0, 1, 1]], 0);
+    const nearest = nearestCorrelationMatrix(
+      [
+        [1, 1, 0],
+        [1, 1, 1],
+        [0, 1, 1],
+      ],
+      0,
+    );
     expect(nearest[0][1]).toBeCloseTo(0.7607, 4);
     expect(nearest[1][2]).toBeCloseTo(0.7607, 4);
     expect(nearest[0][2]).toBeCloseTo(0.1573, 4);
   });
 
   it('is the matrix itself where that is right already', () => {
-    const matrix = [[1, 0.5, 0.2], [0.5, 1, 0.3], [0.2, 0.3, 1]];
+    const matrix = [
+      [1, 0.5, 0.2],
+      [0.5, 1, 0.3],
+      [0.2, 0.3, 1],
+    ];
     expect(nearestCorrelationMatrix(matrix, 0).map((row) => [...row])).toEqual(
       matrix.map((row) => row.map((value) => expect.closeTo(value, 12))),
     );
@@ -85,8 +104,16 @@ describe('the nearest correlation matrix', () => {
 
   it('is nearer than any other right matrix of three inputs on a fine grid', () => {
     const wanted = [0.9, 0.9, 0.1];
-    const distance = ([a, b, c]: number[]) => (a - wanted[0]) ** 2 + (b - wanted[1]) ** 2 + (c - wanted[2]) ** 2;
-    const nearest = nearestCorrelationMatrix([[1, 0.9, 0.1], [0.9, 1, 0.9], [0.1, 0.9, 1]], 0);
+    const distance = ([a, b, c]: number[]) =>
+      (a - wanted[0]) ** 2 + (b - wanted[1]) ** 2 + (c - wanted[2]) ** 2;
+    const nearest = nearestCorrelationMatrix(
+      [
+        [1, 0.9, 0.1],
+        [0.9, 1, 0.9],
+        [0.1, 0.9, 1],
+      ],
+      0,
+    );
     const found = distance([nearest[0][1], nearest[1][2], nearest[0][2]]);
     let best = Infinity;
     for (let a = -1; a <= 1; a += 0.02) {
@@ -123,9 +150,13 @@ describe('rank correlations of a project', () => {
     if (checked.ok) throw new Error('it was accepted');
     expect(checked.faults).toHaveLength(1);
     expect(checked.faults[0].pointer).toBe('/rank_correlations/1');
-    const offered = [...checked.faults[0].right.matchAll(/soil\/clay\/(\w+) with soil\/clay\/(\w+) (-?[\d.]+)/g)];
+    const offered = [
+      ...checked.faults[0].right.matchAll(/soil\/clay\/(\w+) with soil\/clay\/(\w+) (-?[\d.]+)/g),
+    ];
     expect(offered.length).toBeGreaterThanOrEqual(2);
-    const again = withCorrelations(...offered.map(([, a, b, rank]): [string, string, number] => [a, b, Number(rank)]));
+    const again = withCorrelations(
+      ...offered.map(([, a, b, rank]): [string, string, number] => [a, b, Number(rank)]),
+    );
     expect(again.ok).toBe(true);
   });
 
@@ -134,7 +165,10 @@ describe('rank correlations of a project', () => {
       [[cc, 'unit_weight', 0.3]],
       [[cc, 'initial_void_rato', 0.3]],
       [[cc, cc, 0.3]],
-      [[cc, e0, 0.3], [e0, cc, 0.3]],
+      [
+        [cc, e0, 0.3],
+        [e0, cc, 0.3],
+      ],
       [[cc, e0, 1]],
     ] as [string, string, number][][]) {
       const checked = withCorrelations(...list);

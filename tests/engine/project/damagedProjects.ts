@@ -22,7 +22,12 @@ interface Change {
 const isList = Array.isArray;
 const isObject = (value: Json) => typeof value === 'object' && value !== null && !isList(value);
 
-function replace(name: string, fits: (value: Json) => boolean, by: (value: Json) => Json, isSingle = true): Change {
+function replace(
+  name: string,
+  fits: (value: Json) => boolean,
+  by: (value: Json) => Json,
+  isSingle = true,
+): Change {
   const apply = (parent: Json, key: string | number) => {
     if (!fits(parent[key])) return false;
     parent[key] = by(parent[key]);
@@ -37,17 +42,54 @@ function replaceNumber(name: string, by: (value: number) => number, isSingle = f
 
 /** Changes that can be made to any member of a project. */
 export const CHANGES: readonly Change[] = [
-  replace('null', () => true, () => null),
-  replace('a text', (value) => typeof value !== 'string', () => 'seven'),
-  replace('an empty text', (value) => typeof value === 'string', () => ''),
-  replace('an empty list', (value) => !isList(value), () => []),
-  replace('an empty object', (value) => !isObject(value), () => ({})),
-  replace('true', (value) => typeof value !== 'boolean', () => true),
-  replace('a number', (value) => typeof value !== 'number' && !isObject(value), () => 7.25),
-  replace('in a list', () => true, (value) => [value]),
+  replace(
+    'null',
+    () => true,
+    () => null,
+  ),
+  replace(
+    'a text',
+    (value) => typeof value !== 'string',
+    () => 'seven',
+  ),
+  replace(
+    'an empty text',
+    (value) => typeof value === 'string',
+    () => '',
+  ),
+  replace(
+    'an empty list',
+    (value) => !isList(value),
+    () => [],
+  ),
+  replace(
+    'an empty object',
+    (value) => !isObject(value),
+    () => ({}),
+  ),
+  replace(
+    'true',
+    (value) => typeof value !== 'boolean',
+    () => true,
+  ),
+  replace(
+    'a number',
+    (value) => typeof value !== 'number' && !isObject(value),
+    () => 7.25,
+  ),
+  replace(
+    'in a list',
+    () => true,
+    (value) => [value],
+  ),
   replace('a strange key in it', isObject, (value) => ({ ...value, colour: 'blue' })),
   replace('a key __proto__ in it', isObject, (value) =>
-    JSON.parse(JSON.stringify(value).replace('{', Object.keys(value).length > 0 ? '{"__proto__":{"a":1},' : '{"__proto__":1')),
+    JSON.parse(
+      JSON.stringify(value).replace(
+        '{',
+        Object.keys(value).length > 0 ? '{"__proto__":{"a":1},' : '{"__proto__":1',
+      ),
+    ),
   ),
   replace('a constructor in it', isObject, (value) => ({ ...value, constructor: { prototype: 1 } })),
   replaceNumber('1e300', () => 1e300, true),
@@ -101,7 +143,11 @@ export const CHANGES: readonly Change[] = [
   },
 ];
 
-function members(value: Json, path: string, into: { parent: Json; key: string | number; path: string }[]): void {
+function members(
+  value: Json,
+  path: string,
+  into: { parent: Json; key: string | number; path: string }[],
+): void {
   if (typeof value !== 'object' || value === null) return;
   for (const key of Object.keys(value)) {
     into.push({ parent: value, key: isList(value) ? Number(key) : key, path: `${path}/${key}` });
@@ -110,7 +156,10 @@ function members(value: Json, path: string, into: { parent: Json; key: string | 
 }
 
 /** The changes one after the other, each at a member that its number picks. */
-export function damaged(isFull: boolean, picks: readonly { readonly member: number; readonly change: number }[]): DamagedProject {
+export function damaged(
+  isFull: boolean,
+  picks: readonly { readonly member: number; readonly change: number }[],
+): DamagedProject {
   const project = isFull ? fullProject() : plainProject();
   const done: string[] = [];
   let isSingle = true;

@@ -25,7 +25,7 @@ describe('the digest of a model', () => {
       digestOf((project) => (project.fill.submergence = true)),
       digestOf((project) => (project.rank_correlations[0].rank_correlation = 0.61)),
       digestOf((project) => (project.limits[0].limit_mm = 501)),
-      digestOf((project) => (project.soils[0].id = 'd', project.rank_correlations = [])),
+      digestOf((project) => ((project.soils[0].id = 'd'), (project.rank_correlations = []))),
     ];
     expect(new Set(digests).size).toBe(digests.length);
   });
@@ -37,7 +37,9 @@ describe('the digest of a model', () => {
       digestOf((project) => (project.soils[0].unit_weight_kN_m3.source.text = 'other')),
       digestOf((project) => (project.soils[0].unit_weight_kN_m3 = 16)),
       digestOf((project) => (project.sampling = { realisations: 1000, seed: 9 })),
-      digestOf((project) => (project.soils[0] = Object.fromEntries(Object.entries(project.soils[0]).reverse()))),
+      digestOf(
+        (project) => (project.soils[0] = Object.fromEntries(Object.entries(project.soils[0]).reverse())),
+      ),
       digestOf((project) => delete project.secondary),
     ];
     expect(new Set([...same, digestOf()]).size).toBe(1);
@@ -45,12 +47,14 @@ describe('the digest of a model', () => {
 
   it('tells apart 200,000 texts that differ in one place', () => {
     const seen = new Set<string>();
-    for (let i = 0; i < 100_000; i += 1) seen.add(hash128(`thickness:${i / 1000}`)).add(hash128(`a${'b'.repeat(i % 50)}${i}`));
+    for (let i = 0; i < 100_000; i += 1)
+      seen.add(hash128(`thickness:${i / 1000}`)).add(hash128(`a${'b'.repeat(i % 50)}${i}`));
     expect(seen.size).toBe(200_000);
   });
 
   it('spreads a change of one letter over half of all bits', () => {
-    const bits = (text: string) => [...hash128(text)].flatMap((digit) => [...parseInt(digit, 16).toString(2).padStart(4, '0')]);
+    const bits = (text: string) =>
+      [...hash128(text)].flatMap((digit) => [...parseInt(digit, 16).toString(2).padStart(4, '0')]);
     let changed = 0;
     for (let i = 0; i < 500; i += 1) {
       const [a, b] = [bits(`value:${i}`), bits(`value:${i}x`)];

@@ -60,9 +60,17 @@ export function fullProject(): Record<string, any> {
         id: 'c',
         note: 'invented',
         unit_weight_kN_m3: { marginal: 'fixed', value: 16, source: SOURCE, note: 'invented' },
-        compression_index: { marginal: 'lognormal', mean: 0.6, deviation: 0.15, varies: VARIES, source: { kind: 'test' } },
+        compression_index: {
+          marginal: 'lognormal',
+          mean: 0.6,
+          deviation: 0.15,
+          varies: VARIES,
+          source: { kind: 'test' },
+        },
         swelling_ratio: { marginal: 'uniform', low: 0.08, high: 0.14 },
-        preconsolidation: { pop_kPa: { marginal: 'beta', low: -2, high: 30, mean: 12, deviation: 5, varies: VARIES } },
+        preconsolidation: {
+          pop_kPa: { marginal: 'beta', low: -2, high: 30, mean: 12, deviation: 5, varies: VARIES },
+        },
         consolidation: {
           cv_m2_per_year: { marginal: 'pert', low: 1, best: 2, high: 5, varies: VARIES },
           permeability_index: 0.7,
@@ -85,7 +93,10 @@ export function fullProject(): Record<string, any> {
             { depth_m: 9, stress_kPa: 80 },
           ],
         },
-        consolidation: { k0_m_per_s: { marginal: 'lognormal', median: 1e-9, cov: 0.6 }, permeability_index: 1 },
+        consolidation: {
+          k0_m_per_s: { marginal: 'lognormal', median: 1e-9, cov: 0.6 },
+          permeability_index: 1,
+        },
         secondary_index: 0.04,
       },
       { ...plain.soils[1], note: 'invented' },
@@ -126,7 +137,13 @@ export function fullProject(): Record<string, any> {
     fill: {
       note: 'invented',
       lifts: [
-        { ...withoutPlacing(plain.fill.lifts[0]), name: 'old bank', id: 'o', thickness_m: 0.8, standing: true },
+        {
+          ...withoutPlacing(plain.fill.lifts[0]),
+          name: 'old bank',
+          id: 'o',
+          thickness_m: 0.8,
+          standing: true,
+        },
         {
           ...plain.fill.lifts[0],
           note: 'invented',
@@ -171,7 +188,12 @@ export function fullProject(): Record<string, any> {
       from_x_m: -15,
       to_x_m: 15,
     },
-    vacuum: { note: 'invented', pressure_kPa: { marginal: 'uniform', low: 60, high: 80 }, start_year: 0, end_year: 1 },
+    vacuum: {
+      note: 'invented',
+      pressure_kPa: { marginal: 'uniform', low: 60, high: 80 },
+      start_year: 0,
+      end_year: 1,
+    },
     secondary: { included: true, reduction_floor: 0.1, reduction_exponent: 6, note: 'invented' },
     points: [
       { name: 'centre', x_m: 0, note: 'invented' },
@@ -199,7 +221,11 @@ export function fullProject(): Record<string, any> {
       note: 'invented',
     },
     rank_correlations: [
-      { between: ['soil/c/compression_index', 'soil/c/initial_void_ratio'], rank_correlation: 0.6, note: 'invented' },
+      {
+        between: ['soil/c/compression_index', 'soil/c/initial_void_ratio'],
+        rank_correlation: 0.6,
+        note: 'invented',
+      },
       { between: ['soil/c/compression_index', 'soil/c/cv'], rank_correlation: -0.3 },
     ],
     sampling: { realisations: 200, seed: 5, note: 'invented' },

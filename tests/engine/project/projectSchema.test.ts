@@ -1,5 +1,7 @@
 import { Ajv2020 } from 'ajv/dist/2020.js';
 import { readdirSync, readFileSync } from 'node:fs';
+import { format, resolveConfig } from 'prettier';
+import { fileURLToPath } from 'node:url';
 import { describe, expect, it } from 'vitest';
 import { checkProject } from '../../../engine/project/checkProject.ts';
 import { projectSchema } from '../../../engine/project/projectSchema.ts';
@@ -12,9 +14,13 @@ const accepts = new Ajv2020({ strict: false, allErrors: false }).compile(JSON.pa
 
 describe('the published schema of the project file', () => {
   it('is the one that the program describes', async () => {
-    await expect(`${JSON.stringify(projectSchema())}\n`).toMatchFileSnapshot(
-      '../../../public/schema/project.schema.json',
-    );
+    // written anew by `npx vitest run projectSchema -u`
+    const file = fileURLToPath(new URL('schema/project.schema.json', PUBLIC));
+    const text = await format(JSON.stringify(projectSchema()), {
+      ...(await resolveConfig(file)),
+      parser: 'json',
+    });
+    await expect(text).toMatchFileSnapshot(file);
   });
 
   it('is a valid schema of draft 2020-12', () => {
@@ -36,9 +42,11 @@ describe('the published schema of the project file', () => {
     }
   });
 
-  const damaged = damagedProjects(2_000, 20_261);
+  const damaged = damagedProjects(600, 20_261);
   it(`accepts every one of ${damaged.length} changed files that the checker accepts`, () => {
-    const refused = damaged.filter(({ project }) => checkProject(JSON.stringify(project)).ok && !accepts(project));
+    const refused = damaged.filter(
+      ({ project }) => checkProject(JSON.stringify(project)).ok && !accepts(project),
+    );
     expect(refused.map(({ change }) => change)).toEqual([]);
   });
 
@@ -50,7 +58,7 @@ describe('the published schema of the project file', () => {
 
   it('sees both accepted and refused files in that test', () => {
     const verdicts = damaged.map(({ project }) => checkProject(JSON.stringify(project)).ok);
-    expect(verdicts.filter(Boolean).length).toBeGreaterThan(100);
-    expect(verdicts.filter((ok) => !ok).length).toBeGreaterThan(100);
+    expect(verdicts.filter(Boolean).length).toBeGreaterThan(50);
+    expect(verdicts.filter((ok) => !ok).length).toBeGreaterThan(50);
   });
 });

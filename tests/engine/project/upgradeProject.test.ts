@@ -11,7 +11,11 @@ const steps = [
 
 describe('the upgrade of an older file', () => {
   it('goes one version at a time up to the current one', () => {
-    expect(upgradeProject({ version: 1, name: 'old' }, 1, steps, 3)).toEqual({ version: 3, name: 'old', crest_width: 2 });
+    expect(upgradeProject({ version: 1, name: 'old' }, 1, steps, 3)).toEqual({
+      version: 3,
+      name: 'old',
+      crest_width: 2,
+    });
     expect(upgradeProject({ version: 2, width: 7 }, 2, steps, 3)).toEqual({ version: 3, crest_width: 7 });
   });
 
@@ -26,6 +30,8 @@ describe('the upgrade of an older file', () => {
   });
 
   it('has a step for every version before the current one', () => {
-    expect(UPGRADE_STEPS.map(({ from }) => from)).toEqual(Array.from({ length: CURRENT_VERSION - 1 }, (_, i) => i + 1));
+    expect(UPGRADE_STEPS.map(({ from }) => from)).toEqual(
+      Array.from({ length: CURRENT_VERSION - 1 }, (_, i) => i + 1),
+    );
   });
 });

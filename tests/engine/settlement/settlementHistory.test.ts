@@ -1,8 +1,8 @@
+import { endOfPlacing } from '../../../engine/settlement/track.ts';
 import { describe, expect, it } from 'vitest';
 import {
   dateOfDegree,
   dateOfSettlementStillToCome,
-  endOfPlacing,
   valueAtDate,
 } from '../../../engine/settlement/settlementHistory.ts';
 import { dateAt } from '../../../engine/settlement/timeGrid.ts';

@@ -16,8 +16,10 @@ const drains = { spacing: 1, diameter: 0.066, foot: 6 };
 describe('a vacuum', () => {
   it('settles a column with a closed base as much in the end as a wide load of its size', () => {
     const given: Plain = { layers: [{ thickness: 6, soil: clay }], base: 'closed', drains, horizon: 20 };
-    const vacuum = marchedModel({ ...given, vacuum: { pressure: 70 } }, resolution).settlementAt(20);
-    const load = marchedModel({ ...given, loads: [{ pressure: 70 }] }, resolution).settlementAt(20);
+    // at the working steps the two differ by 1e-5, because σ' overshoots a little on its way to rest
+    const finer = { cells: 60, steps: 96 };
+    const vacuum = marchedModel({ ...given, vacuum: { pressure: 70 } }, finer).settlementAt(20);
+    const load = marchedModel({ ...given, loads: [{ pressure: 70 }] }, finer).settlementAt(20);
     expect(vacuum / load).toBeCloseTo(1, 5);
   });
 

@@ -7,23 +7,23 @@ const shape = { from: 0, to: 100, top: 5, base: -15, water: 0, layers: [], lifts
 
 describe('the scale of the section', () => {
   it('is the same both ways where the height allows it', () => {
-    const scale = sectionScale(shape, 1000 + MARGINS.left + MARGINS.right, 150, 400);
+    const scale = sectionScale(shape, 1000 + MARGINS.left + MARGINS.right, 150, 400, 50);
     expect(scale.exaggeration).toBe(1);
     expect(scale.x(10) - scale.x(0)).toBeCloseTo(100, 9);
     expect(scale.y(0) - scale.y(10)).toBeCloseTo(100, 9);
-    expect(scale.height).toBeCloseTo(200 + MARGINS.top + MARGINS.bottom, 9);
+    expect(scale.height).toBeCloseTo(200 + 50 + MARGINS.bottom, 9);
   });
 
   it('stretches heights, and says how much, where the section would be a thread', () => {
-    const scale = sectionScale({ ...shape, to: 1000 }, 1000 + MARGINS.left + MARGINS.right, 150, 400);
+    const scale = sectionScale({ ...shape, to: 1000 }, 1000 + MARGINS.left + MARGINS.right, 150, 400, 50);
     expect(scale.exaggeration).toBe(8); // 20 m at 1 px/m is 20 px; 8 is the least listed that reaches 150 px
     expect(scale.y(0) - scale.y(10)).toBeCloseTo(8 * (scale.x(10) - scale.x(0)), 9);
   });
 
   it('is made smaller, not squeezed, where the section would be too high', () => {
-    const scale = sectionScale({ ...shape, to: 20 }, 1000, 150, 400);
+    const scale = sectionScale({ ...shape, to: 20 }, 1000, 150, 400, 50);
     expect(scale.exaggeration).toBe(1);
-    expect(scale.height).toBeCloseTo(400 + MARGINS.top + MARGINS.bottom, 9);
+    expect(scale.height).toBeCloseTo(400 + 50 + MARGINS.bottom, 9);
   });
 
   it('has ticks at round numbers that keep apart', () => {
@@ -67,9 +67,9 @@ describe('names above their marks', () => {
     ).toEqual([0, 1]);
   });
 
-  it('are left out where two rows do not hold them, and the marks stay', () => {
+  it('are left out where three rows do not hold them, and the marks stay', () => {
     const crowd = Array.from({ length: 5 }, (_, i) => ({ x: 100 + i, width: 60 }));
-    expect(nameRows(crowd, 400).map(({ row }) => row)).toEqual([0, 1, -1, -1, -1]);
+    expect(nameRows(crowd, 400).map(({ row }) => row)).toEqual([0, 1, 2, -1, -1]);
   });
 
   it('stay inside the drawing', () => {
