@@ -1,5 +1,5 @@
 import { drawnValue, type DrawnGround } from '../sampling/drawnGround.ts';
-import type { CompressibleSoil, IndexOrRatio, Preconsolidation, Soil } from '../project/model.ts';
+import type { CompressibleSoil, IndexOrRatio, Preconsolidation, Soil } from '../project/soil.ts';
 import { metresPerYear } from '../units.ts';
 
 /** A soil's parameters in one realisation at one point, in engine units. */

@@ -1,5 +1,6 @@
 import { centralValue } from './centralValue.ts';
-import type { Lift, SurfaceLoad, UncertainNumber, Vacuum } from './model.ts';
+import type { Lift, SurfaceLoad, Vacuum } from './model.ts';
+import type { UncertainNumber } from './uncertainNumber.ts';
 import type { Place } from './place.ts';
 import type { Reading } from './reading.ts';
 

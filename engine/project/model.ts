@@ -1,4 +1,5 @@
-import type { Marginal } from '../marginals/marginal.ts';
+import type { Soil } from './soil.ts';
+import type { UncertainNumber } from './uncertainNumber.ts';
 
 /**
  * The checked model: what the engine computes from. Plain, deeply readonly data in engine units
@@ -69,106 +70,6 @@ export interface Remark {
   readonly pointer: string;
   readonly sentence: string;
 }
-
-/** A number of the model, fixed or drawn. */
-export interface UncertainNumber {
-  /** Permanent name, such as 'soil/soft clay/compression_index'; seeds the input's own stream. */
-  readonly name: string;
-  /** In words, such as 'compression index of soft clay'. */
-  readonly label: string;
-  /** Unit of the values of `marginal`, '1' for a pure number. */
-  readonly unit: string;
-  readonly marginal: Marginal;
-  /** Place in `Model.inputs`, −1 when fixed. */
-  readonly index: number;
-  /** How it varies from place to place; null when it does not. */
-  readonly spread: Spread | null;
-  /** Whether the value at a point keeps the marginal's mean by a ratio (not so for c_v, k0, c_h/c_v). */
-  readonly keepsMean: boolean;
-  readonly source: Source;
-  readonly note: string;
-}
-
-export interface Source {
-  readonly kind: 'test' | 'correlation' | 'published range' | 'judgement' | 'not stated';
-  readonly text: string;
-}
-
-export interface Spread {
-  /** Share of the variance that varies from place to place, above 0 and at most 1. */
-  readonly share: number;
-  /** Vertical scale of fluctuation, m; null for a thickness, of which nothing is averaged (Γ² = 1). */
-  readonly verticalScale: number | null;
-  /** Horizontal scale of fluctuation, m. */
-  readonly horizontalScale: number;
-}
-
-export type Soil = CompressibleSoil | StiffFreeDrainingSoil | StiffPoorlyDrainingSoil;
-
-export interface CompressibleSoil {
-  readonly behaviour: 'compressible';
-  readonly name: string;
-  readonly unitWeight: UncertainNumber;
-  readonly compressionIndex: UncertainNumber;
-  readonly recompression: IndexOrRatio;
-  /** Swelling index Cs; null: Cr serves. */
-  readonly swelling: IndexOrRatio | null;
-  readonly initialVoidRatio: UncertainNumber;
-  readonly preconsolidation: Preconsolidation;
-  readonly permeability: PermeabilityLaw;
-  readonly horizontalRatio: UncertainNumber;
-  /** Factor on k before first yield, 1 when there is none. */
-  readonly preYieldFactor: UncertainNumber;
-  /** Secondary compression index Cα, or Cα/Cc; null when none is given. */
-  readonly secondary: IndexOrRatio | null;
-}
-
-export interface StiffFreeDrainingSoil {
-  readonly behaviour: 'stiff_free_draining';
-  readonly name: string;
-  readonly unitWeight: UncertainNumber;
-  /** Constrained modulus M, kPa. */
-  readonly modulus: UncertainNumber;
-}
-
-export interface StiffPoorlyDrainingSoil {
-  readonly behaviour: 'stiff_poorly_draining';
-  readonly name: string;
-  readonly unitWeight: UncertainNumber;
-  readonly modulus: UncertainNumber;
-  /** c_v, m²/year. */
-  readonly verticalCoefficient: UncertainNumber;
-  readonly horizontalRatio: UncertainNumber;
-}
-
-/** An index given by itself, or by its ratio to C_c. */
-export interface IndexOrRatio {
-  readonly given: 'index' | 'ratio';
-  readonly number: UncertainNumber;
-}
-
-export type Preconsolidation =
-  | { readonly kind: 'ocr'; readonly ocr: UncertainNumber }
-  | { readonly kind: 'pop'; readonly pop: UncertainNumber }
-  | {
-      readonly kind: 'profile';
-      readonly upper: { readonly depth: number; readonly stress: UncertainNumber };
-      readonly lower: { readonly depth: number; readonly stress: UncertainNumber };
-    };
-
-export type PermeabilityLaw =
-  | {
-      /** c_v of virgin compression, m²/year; Ck = Cc unless given. */
-      readonly kind: 'cv';
-      readonly verticalCoefficient: UncertainNumber;
-      readonly permeabilityIndex: UncertainNumber | null;
-    }
-  | {
-      /** k at e0, m/s (as entered); Ck = 0.5 e0 unless given (Tavenas et al. 1983). */
-      readonly kind: 'k0';
-      readonly permeability: UncertainNumber;
-      readonly permeabilityIndex: UncertainNumber | null;
-    };
 
 export interface Layer {
   readonly name: string;

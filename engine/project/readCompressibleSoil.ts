@@ -1,11 +1,6 @@
 import { centralValue } from './centralValue.ts';
-import type {
-  CompressibleSoil,
-  IndexOrRatio,
-  PermeabilityLaw,
-  Preconsolidation,
-  UncertainNumber,
-} from './model.ts';
+import type { CompressibleSoil, IndexOrRatio, PermeabilityLaw, Preconsolidation } from './soil.ts';
+import type { UncertainNumber } from './uncertainNumber.ts';
 import type { NumberRange } from './numberRange.ts';
 import { exactlyOneKey, openObject, orElse, placeOfKey, type OpenedObject } from './openObject.ts';
 import { CENTRAL, PHYSICAL } from './physicalRanges.ts';

@@ -1,4 +1,5 @@
-import type { Drains, UncertainNumber, Vacuum } from './model.ts';
+import type { Drains, Vacuum } from './model.ts';
+import type { UncertainNumber } from './uncertainNumber.ts';
 import { exactlyOneKey, openObject, orElse, placeOfKey, type OpenedObject } from './openObject.ts';
 import { PHYSICAL } from './physicalRanges.ts';
 import { fixedNumber } from './readCompressibleSoil.ts';

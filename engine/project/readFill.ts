@@ -1,4 +1,5 @@
-import type { Lift, OutOfPlane, Period, UncertainNumber } from './model.ts';
+import type { Lift, OutOfPlane, Period } from './model.ts';
+import type { UncertainNumber } from './uncertainNumber.ts';
 import { openObject, orElse, placeOfKey, type OpenedObject } from './openObject.ts';
 import { MOST, PHYSICAL } from './physicalRanges.ts';
 import type { Place } from './place.ts';

@@ -1,4 +1,5 @@
-import type { Model, UncertainNumber } from './model.ts';
+import type { Model } from './model.ts';
+import type { UncertainNumber } from './uncertainNumber.ts';
 import { fromTo } from './numberRange.ts';
 import { openObject, orElse, placeOfKey, type KnownKeys, type OpenedObject } from './openObject.ts';
 import { MOST, PHYSICAL } from './physicalRanges.ts';

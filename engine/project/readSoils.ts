@@ -1,4 +1,4 @@
-import type { Soil, StiffFreeDrainingSoil, StiffPoorlyDrainingSoil } from './model.ts';
+import type { Soil, StiffFreeDrainingSoil, StiffPoorlyDrainingSoil } from './soil.ts';
 import { openObject, orElse, type OpenedObject } from './openObject.ts';
 import { MOST, PHYSICAL } from './physicalRanges.ts';
 import type { Place } from './place.ts';

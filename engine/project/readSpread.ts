@@ -1,4 +1,4 @@
-import type { Spread } from './model.ts';
+import type { Spread } from './uncertainNumber.ts';
 import { openObject } from './openObject.ts';
 import { PHYSICAL } from './physicalRanges.ts';
 import type { Place } from './place.ts';

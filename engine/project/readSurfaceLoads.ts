@@ -1,4 +1,5 @@
-import type { SurfaceLoad, UncertainNumber } from './model.ts';
+import type { SurfaceLoad } from './model.ts';
+import type { UncertainNumber } from './uncertainNumber.ts';
 import { openObject, orElse, type OpenedObject } from './openObject.ts';
 import { MOST, PHYSICAL } from './physicalRanges.ts';
 import { readOutOfPlane } from './readFill.ts';

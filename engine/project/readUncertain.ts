@@ -1,7 +1,7 @@
 import { median, type Marginal } from '../marginals/marginal.ts';
 import { describeFound, quoted } from './describeFound.ts';
 import { keyInWords, keyWithoutUnit, unitOfKey } from './keyWords.ts';
-import type { Source, Spread, UncertainNumber } from './model.ts';
+import type { Source, Spread, UncertainNumber } from './uncertainNumber.ts';
 import { nearestWord } from './nearestWord.ts';
 import { isInRange, rangeInWords, type NumberRange } from './numberRange.ts';
 import { inWords, openObject, orElse, placeOfKey, type OpenedObject } from './openObject.ts';

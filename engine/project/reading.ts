@@ -1,6 +1,6 @@
 import { isUncertain } from '../marginals/marginal.ts';
 import { FaultList } from './faultList.ts';
-import type { UncertainNumber } from './model.ts';
+import type { UncertainNumber } from './uncertainNumber.ts';
 import type { Place } from './place.ts';
 
 /** What builds up while one file is read: its faults and its inputs. */

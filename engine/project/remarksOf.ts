@@ -1,12 +1,10 @@
 import { deviation, mean } from '../marginals/marginal.ts';
 import { quoted } from './describeFound.ts';
-import type { Model, Remark } from './model.ts';
+import type { Remark } from './model.ts';
 import type { Place } from './place.ts';
 import { remarksOnDates } from './remarksOnDates.ts';
 import { remarksOnDrains } from './remarksOnDrains.ts';
-
-/** A model of which only the remarks and the digest are still to be made. */
-export type UnremarkedModel = Omit<Model, 'digest' | 'remarks'>;
+import type { UnremarkedModel } from './unremarkedModel.ts';
 
 /** Realisations of the ten replicates that a band needs. */
 const REALISATIONS_FOR_BAND = 1_000;

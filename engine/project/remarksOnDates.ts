@@ -1,7 +1,7 @@
 import { centralValue } from './centralValue.ts';
 import { quoted } from './describeFound.ts';
 import type { Remark } from './model.ts';
-import type { UnremarkedModel } from './remarksOf.ts';
+import type { UnremarkedModel } from './unremarkedModel.ts';
 
 /** What stands oddly in time, in the central case. */
 export function remarksOnDates(model: UnremarkedModel): Remark[] {

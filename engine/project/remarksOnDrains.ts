@@ -1,7 +1,7 @@
 import { centralLayers, influenceOver, type CentralLayer } from './checkDrainage.ts';
 import { quoted } from './describeFound.ts';
 import type { Drains, Remark } from './model.ts';
-import type { UnremarkedModel } from './remarksOf.ts';
+import type { UnremarkedModel } from './unremarkedModel.ts';
 
 /** Diameters of a drain in the ground that it serves below which the drain factor is less exact (Hansbo 1981). */
 const WIDE_ENOUGH = 10;

@@ -1,4 +1,5 @@
-import type { Thickness, UncertainNumber } from './model.ts';
+import type { Thickness } from './model.ts';
+import type { UncertainNumber } from './uncertainNumber.ts';
 
 /**
  * Thickness at x from thicknesses at the borings: straight between them and level beyond the outermost.

@@ -1,4 +1,5 @@
-import type { Model, UncertainNumber } from '../project/model.ts';
+import type { Model } from '../project/model.ts';
+import type { UncertainNumber } from '../project/uncertainNumber.ts';
 import { limits, quantile } from '../marginals/marginal.ts';
 import { normalQuantile } from '../marginals/standardNormal.ts';
 import { randomStream } from '../random/randomStream.ts';

@@ -1,4 +1,4 @@
-import type { UncertainNumber } from '../project/model.ts';
+import type { UncertainNumber } from '../project/uncertainNumber.ts';
 import { median } from '../marginals/marginal.ts';
 
 /**

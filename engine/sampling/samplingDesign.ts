@@ -1,4 +1,5 @@
-import type { Model, UncertainNumber } from '../project/model.ts';
+import type { Model } from '../project/model.ts';
+import type { UncertainNumber } from '../project/uncertainNumber.ts';
 import { meanKeepingRatio } from './meanKeepingRatio.ts';
 import { numbersOfSoil, soilThickness } from './soilThickness.ts';
 import { pairingOf, type Pairing } from './pairing.ts';

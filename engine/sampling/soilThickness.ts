@@ -1,4 +1,6 @@
-import type { CompressibleSoil, IndexOrRatio, Model, Soil, UncertainNumber } from '../project/model.ts';
+import type { Model } from '../project/model.ts';
+import type { CompressibleSoil, IndexOrRatio, Soil } from '../project/soil.ts';
+import type { UncertainNumber } from '../project/uncertainNumber.ts';
 import { thicknessAt, thicknessNumber } from '../project/thicknessAt.ts';
 import { median } from '../marginals/marginal.ts';
 

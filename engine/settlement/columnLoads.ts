@@ -1,7 +1,8 @@
 import { liftPressure, liftThicknessAt, pressureAt, type LiftShape } from '../load/fillSection.ts';
 import type { ActingPeriod } from '../load/programme.ts';
 import { stressIncrease } from '../load/stressIncrease.ts';
-import type { Lift, Model, Period, UncertainNumber } from '../project/model.ts';
+import type { Lift, Model, Period } from '../project/model.ts';
+import type { UncertainNumber } from '../project/uncertainNumber.ts';
 import type { AppliedLoad } from './column.ts';
 
 /** Value of an uncertain number in the realisation and at the point at hand. */

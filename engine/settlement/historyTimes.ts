@@ -1,5 +1,6 @@
 import { median } from '../marginals/marginal.ts';
-import type { Model, UncertainNumber } from '../project/model.ts';
+import type { Model } from '../project/model.ts';
+import type { UncertainNumber } from '../project/uncertainNumber.ts';
 import { RATE_PERIOD } from './settlementHistory.ts';
 import { dateAt, SAME_DATE } from './timeGrid.ts';
 

@@ -1,7 +1,7 @@
 import { exp, ln } from '../elementary.ts';
 import { actingShare } from '../load/programme.ts';
 import type { Column, SecondaryLaw } from './column.ts';
-import type { ColumnState } from './step.ts';
+import type { ColumnState } from './columnState.ts';
 import type { TotalStress } from './stressState.ts';
 import { SAME_DATE } from './timeGrid.ts';
 

@@ -7,26 +7,10 @@ import {
   type CompressionLaw,
 } from '../ground/compressionLaw.ts';
 import type { Column } from './column.ts';
+import type { ColumnState } from './columnState.ts';
 import { flowCoefficients, type Flow } from './flow.ts';
 import type { TotalStress } from './stressState.ts';
-
-/** The state of a column between two steps; arrays over the cells. */
-export interface ColumnState {
-  /** Excess pore pressure, kPa. */
-  readonly pore: Float64Array;
-  /** σ', kPa. */
-  readonly stress: Float64Array;
-  /** Largest σ' so far, kPa. */
-  readonly largest: Float64Array;
-  /** Primary strain. */
-  readonly strain: Float64Array;
-  /** σ' of a cell has fallen below 1 kPa, where swelling goes on straight. */
-  swelledStraight: boolean;
-  /** Secondary settlement so far, m, before the factor on settlement. */
-  secondary: number;
-  /** Settlement so far, m, with the factor. */
-  settlement: number;
-}
+import { eliminate } from './eliminate.ts';
 
 /** Arrays that a step works in. */
 export interface StepScratch {
@@ -110,7 +94,7 @@ export function solveStep(
     applyLaw(column, total, state, scratch);
     if (!scratch.flowKept) flowCoefficients(column, state, total.drained, scratch.flow);
     assemble(column, total, before, duration, state, scratch);
-    eliminate(scratch, total.coupled);
+    eliminate(scratch.offDiagonal, scratch.diagonal, scratch.rest, total.coupled ? scratch.perMetre : null);
     improve(column, total, state, scratch);
   }
   return scratch.closed;
@@ -215,36 +199,6 @@ function assemble(
       perMetre[i] = softness * slope[i];
     }
     above = pore[i];
-  }
-}
-
-/** Solves the symmetric tridiagonal system in place, for `rest` and, when coupled, for `perMetre`. */
-function eliminate(scratch: StepScratch, coupled: boolean): void {
-  const { offDiagonal, diagonal, rest, perMetre } = scratch;
-  const cells = diagonal.length;
-  // `diagonal` becomes its own inverse row by row
-  let inverse = 1 / diagonal[0];
-  diagonal[0] = inverse;
-  for (let i = 1; i < cells; i += 1) {
-    const off = offDiagonal[i];
-    const factor = off * inverse;
-    inverse = 1 / (diagonal[i] - factor * off);
-    diagonal[i] = inverse;
-    rest[i] -= factor * rest[i - 1];
-    if (coupled) perMetre[i] -= factor * perMetre[i - 1];
-  }
-  let restBelow = 0;
-  let perMetreBelow = 0;
-  let next = 0;
-  for (let i = cells - 1; i >= 0; i -= 1) {
-    inverse = diagonal[i];
-    restBelow = (rest[i] - next * restBelow) * inverse;
-    rest[i] = restBelow;
-    if (coupled) {
-      perMetreBelow = (perMetre[i] - next * perMetreBelow) * inverse;
-      perMetre[i] = perMetreBelow;
-    }
-    next = offDiagonal[i];
   }
 }
 

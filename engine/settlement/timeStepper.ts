@@ -1,6 +1,7 @@
 import { STRAIGHT_BELOW } from '../ground/compressionLaw.ts';
 import type { Column } from './column.ts';
-import { endStep, solveStep, stepScratch, type ColumnState } from './step.ts';
+import { stateAtRest, type ColumnState } from './columnState.ts';
+import { endStep, solveStep, stepScratch } from './step.ts';
 import type { TotalStress } from './stressState.ts';
 
 /** Share of its σ' that the first iterate of a step may take from a cell. */
@@ -143,17 +144,4 @@ function leavesRange(total: TotalStress, sunk: number, found: PoreRange, allowed
     tolerance += steepest * Math.abs(sunk);
   }
   return found.low < allowed.low - tolerance || found.high > allowed.high + tolerance;
-}
-
-function stateAtRest(column: Column): ColumnState {
-  const { initialStress } = column.law;
-  return {
-    pore: new Float64Array(initialStress.length),
-    stress: initialStress.slice(),
-    largest: initialStress.slice(),
-    strain: new Float64Array(initialStress.length),
-    swelledStraight: false,
-    secondary: 0,
-    settlement: 0,
-  };
 }

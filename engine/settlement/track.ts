@@ -1,6 +1,6 @@
 import { strainAt } from '../ground/compressionLaw.ts';
 import type { Column } from './column.ts';
-import type { ColumnState } from './step.ts';
+import type { ColumnState } from './columnState.ts';
 import type { TotalStress } from './stressState.ts';
 import { SAME_DATE, type Interval } from './timeGrid.ts';
 

@@ -70,7 +70,10 @@ function studiesCovering(ofCase: ClosedFormCase, chances: readonly number[]): nu
   const hits = chances.map(() => 0);
   for (let study = 0; study < STUDIES; study++) {
     sharesAbove(values, ofCase, study, REPLICATES).forEach((shares, i) => {
-      const { low, high } = bandOfShare(shares);
+      const { low, high } = bandOfShare(
+        shares.map((share) => Math.round(100 * share)),
+        shares.map(() => 100),
+      );
       if (low <= chances[i] && chances[i] <= high) hits[i] += 1;
     });
   }

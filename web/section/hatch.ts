@@ -1,4 +1,4 @@
-import type { Soil } from '../../engine/project/model.ts';
+import type { Soil } from '../../engine/project/soil.ts';
 
 /** A hatch of the section by its name. */
 export type Hatch =

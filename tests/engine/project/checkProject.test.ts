@@ -2,23 +2,21 @@ import { describe, expect, it } from 'vitest';
 import { checkProject } from '../../../engine/project/checkProject.ts';
 import { faultSentence, type Fault } from '../../../engine/project/fault.ts';
 import type { Model } from '../../../engine/project/model.ts';
-import { fullProject, plainProject } from './plainProject.ts';
+import { fullProject, plainProject, type Loose } from './plainProject.ts';
 
-type Json = any;
-
-function faultsOf(project: Json): readonly Fault[] {
+function faultsOf(project: Loose): readonly Fault[] {
   const checked = checkProject(typeof project === 'string' ? project : JSON.stringify(project));
   return checked.ok ? [] : checked.faults;
 }
 
-function modelOf(project: Json): Model {
+function modelOf(project: Loose): Model {
   const checked = checkProject(JSON.stringify(project));
   if (!checked.ok) throw new Error(checked.faults.map(faultSentence).join('\n'));
   return checked.model;
 }
 
 /** The faults of a plain or full project after one change. */
-function changed(change: (project: Json) => void, start: Json = plainProject()): readonly Fault[] {
+function changed(change: (project: Loose) => void, start: Loose = plainProject()): readonly Fault[] {
   change(start);
   return faultsOf(start);
 }
@@ -28,8 +26,8 @@ function refuses(
   title: string,
   pointer: string,
   right: RegExp,
-  change: (project: Json) => void,
-  start?: () => Json,
+  change: (project: Loose) => void,
+  start?: () => Loose,
 ) {
   it(`refuses ${title}`, () => {
     const faults = changed(change, start?.());
@@ -167,7 +165,7 @@ describe('keys', () => {
       '{"__proto__":{"drains":{"foot_m":3}},"constructor":1,',
     );
     expect(faultsOf(text).map(({ pointer }) => pointer)).toEqual(['/__proto__', '/constructor']);
-    expect(({} as Json).drains).toBeUndefined();
+    expect(({} as Loose).drains).toBeUndefined();
   });
 
   it('refuses a key that stands twice in one object', () => {
@@ -269,7 +267,7 @@ describe('numbers', () => {
 
 describe('marginals', () => {
   const at = '/soils/0/compression_index';
-  const put = (marginal: Json) => (project: Json) => (project.soils[0].compression_index = marginal);
+  const put = (marginal: Loose) => (project: Loose) => (project.soils[0].compression_index = marginal);
   refuses(
     'low above best',
     at,
@@ -551,7 +549,7 @@ describe('faults', () => {
 });
 
 describe('remarks', () => {
-  const remarks = (change: (project: Json) => void, start: Json = plainProject()) => {
+  const remarks = (change: (project: Loose) => void, start: Loose = plainProject()) => {
     change(start);
     return modelOf(start)
       .remarks.map(({ sentence }) => sentence)

@@ -1,11 +1,9 @@
 import fc from 'fast-check';
-import { fullProject, plainProject } from './plainProject.ts';
-
-type Json = any;
+import { fullProject, plainProject, type Loose } from './plainProject.ts';
 
 /** A project with one thing changed in it. */
 export interface DamagedProject {
-  readonly project: Json;
+  readonly project: Loose;
   /** In words, to find it again. */
   readonly change: string;
   /** Whether the change is of one value or one shape, so that nothing between values can be at fault. */
@@ -16,19 +14,19 @@ interface Change {
   readonly name: string;
   readonly isSingle: boolean;
   /** Changes the member `key` of `parent` in place; says whether there was something to change. */
-  readonly apply: (parent: Json, key: string | number) => boolean;
+  readonly apply: (parent: Loose, key: string | number) => boolean;
 }
 
 const isList = Array.isArray;
-const isObject = (value: Json) => typeof value === 'object' && value !== null && !isList(value);
+const isObject = (value: Loose) => typeof value === 'object' && value !== null && !isList(value);
 
 function replace(
   name: string,
-  fits: (value: Json) => boolean,
-  by: (value: Json) => Json,
+  fits: (value: Loose) => boolean,
+  by: (value: Loose) => Loose,
   isSingle = true,
 ): Change {
-  const apply = (parent: Json, key: string | number) => {
+  const apply = (parent: Loose, key: string | number) => {
     if (!fits(parent[key])) return false;
     parent[key] = by(parent[key]);
     return true;
@@ -144,9 +142,9 @@ export const CHANGES: readonly Change[] = [
 ];
 
 function members(
-  value: Json,
+  value: Loose,
   path: string,
-  into: { parent: Json; key: string | number; path: string }[],
+  into: { parent: Loose; key: string | number; path: string }[],
 ): void {
   if (typeof value !== 'object' || value === null) return;
   for (const key of Object.keys(value)) {
@@ -164,7 +162,7 @@ export function damaged(
   const done: string[] = [];
   let isSingle = true;
   for (const pick of picks) {
-    const all: { parent: Json; key: string | number; path: string }[] = [];
+    const all: { parent: Loose; key: string | number; path: string }[] = [];
     members(project, '', all);
     if (all.length === 0) break;
     const { parent, key, path } = all[pick.member % all.length];

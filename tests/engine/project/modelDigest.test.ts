@@ -1,9 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { checkProject } from '../../../engine/project/checkProject.ts';
 import { hash128 } from '../../../engine/project/modelDigest.ts';
-import { fullProject } from './plainProject.ts';
+import { fullProject, type Loose } from './plainProject.ts';
 
-function digestOf(change: (project: any) => void = () => {}): string {
+function digestOf(change: (project: Loose) => void = () => {}): string {
   const project = fullProject();
   change(project);
   const checked = checkProject(JSON.stringify(project));

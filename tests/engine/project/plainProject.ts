@@ -1,5 +1,9 @@
+/** What a test changes at will, wrong shapes among it. */
+// eslint-disable-next-line @typescript-eslint/no-explicit-any
+export type Loose = any;
+
 /** A small valid project, invented, without anything that may be left out. A new one at each call. */
-export function plainProject(): Record<string, any> {
+export function plainProject(): Record<string, Loose> {
   return {
     format: 'slow-ground-project',
     version: 1,
@@ -47,7 +51,7 @@ const SOURCE = { kind: 'judgement', text: 'invented' };
 const VARIES = { share_of_variance: 0.5, vertical_scale_m: 1, horizontal_scale_m: 30 };
 
 /** A valid project, invented, with every key of the file and every kind of marginal. A new one at each call. */
-export function fullProject(): Record<string, any> {
+export function fullProject(): Record<string, Loose> {
   const plain = plainProject();
   return structuredClone({
     $schema: '../schema/project.schema.json',

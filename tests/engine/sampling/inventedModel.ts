@@ -1,11 +1,6 @@
-import type {
-  CompressibleSoil,
-  Layer,
-  Model,
-  Point,
-  Spread,
-  UncertainNumber,
-} from '../../../engine/project/model.ts';
+import type { Layer, Model, Point } from '../../../engine/project/model.ts';
+import type { CompressibleSoil } from '../../../engine/project/soil.ts';
+import type { Spread, UncertainNumber } from '../../../engine/project/uncertainNumber.ts';
 import type { Marginal } from '../../../engine/marginals/marginal.ts';
 import { fixedMarginal } from './inventedMarginals.ts';
 

@@ -1,5 +1,6 @@
 import { describe, it, expect } from 'vitest';
-import type { CompressibleSoil, Soil, UncertainNumber } from '../../../engine/project/model.ts';
+import type { CompressibleSoil, Soil } from '../../../engine/project/soil.ts';
+import type { UncertainNumber } from '../../../engine/project/uncertainNumber.ts';
 import { numbersOfSoil, soilThickness } from '../../../engine/sampling/soilThickness.ts';
 import { lognormalMarginal } from './inventedMarginals.ts';
 import { evenThickness, fixedNumber, inventedModel } from './inventedModel.ts';

@@ -5,11 +5,10 @@ import type {
   Model,
   OutOfPlane,
   Period,
-  Preconsolidation,
-  Soil,
   SurfaceLoad,
-  UncertainNumber,
 } from '../../../engine/project/model.ts';
+import type { Preconsolidation, Soil } from '../../../engine/project/soil.ts';
+import type { UncertainNumber } from '../../../engine/project/uncertainNumber.ts';
 
 /** A compressible soil of plain numbers; what is left out is 1 where it is a ratio and absent where it is an option. */
 export interface PlainCompressible {

@@ -1,5 +1,6 @@
 import type { Marginal } from '../../../engine/marginals/marginal.ts';
-import type { Model, UncertainNumber } from '../../../engine/project/model.ts';
+import type { Model } from '../../../engine/project/model.ts';
+import type { UncertainNumber } from '../../../engine/project/uncertainNumber.ts';
 
 /** A number of the invented model; the drawing reads nothing of a marginal but its median. */
 export function number(value: number, label: string, unit = 'm', index = -1): UncertainNumber {

@@ -11,7 +11,9 @@ const plain = (text: string) => text.replace(/[\u202f\u00a0]/g, ' ');
 const [afterHandover, atHorizon] = inventedSummary.quantities;
 
 describe('the picture of an exceedance curve', () => {
-  const picture = exceedancePicture(afterHandover, [{ name: 'Ride', value: 0.1, chance: inventedSummary.limits[0].chance }]);
+  const picture = exceedancePicture(afterHandover, [
+    { name: 'Ride', value: 0.1, chance: inventedSummary.limits[0].chance },
+  ]);
   const line = (name: string) => {
     const found = picture.series.find((series) => series.name === name);
     if (found?.kind !== 'line') throw new Error(`no line ${name}`);
@@ -47,7 +49,13 @@ describe('the picture of an exceedance curve', () => {
   });
 
   it('is read straight between its points where it was thinned', () => {
-    const curve = { values: [1, 2], shares: [0.6, 0.2], low: [0.5, 0.1], high: [0.7, 0.3], unresolvedAbove: 2 };
+    const curve = {
+      values: [1, 2],
+      shares: [0.6, 0.2],
+      low: [0.5, 0.1],
+      high: [0.7, 0.3],
+      unresolvedAbove: 2,
+    };
     const read = readExceedance(curve, 1.5, 1000);
     expect(read.share).toBeCloseTo(0.4, 12);
     expect(read.low).toBeCloseTo(0.3, 12);
@@ -55,10 +63,20 @@ describe('the picture of an exceedance curve', () => {
   });
 
   it('has the chance of passing a limit as a point of its own', () => {
-    const curve = { values: [1, 2], shares: [0.6, 0.2], low: [0.5, 0.1], high: [0.7, 0.3], unresolvedAbove: 2 };
+    const curve = {
+      values: [1, 2],
+      shares: [0.6, 0.2],
+      low: [0.5, 0.1],
+      high: [0.7, 0.3],
+      unresolvedAbove: 2,
+    };
     const limit = { name: 'Ride', value: 1.5, chance: { value: 0.35, low: 0.3, high: 0.4 } };
     expect(withLimits(curve, [limit])).toMatchObject({ values: [1, 1.5, 2], shares: [0.6, 0.35, 0.2] });
-    expect(readExceedance(withLimits(curve, [limit]), 1.5, 1000)).toEqual({ share: 0.35, low: 0.3, high: 0.4 });
+    expect(readExceedance(withLimits(curve, [limit]), 1.5, 1000)).toEqual({
+      share: 0.35,
+      low: 0.3,
+      high: 0.4,
+    });
     expect(withLimits(curve, [{ ...limit, value: 3 }]).values).toEqual([1, 2]);
   });
 
