@@ -15,7 +15,7 @@ const RANKS: readonly (readonly string[])[] = [
   ['engine/summary'],
   ['engine/study'],
 ];
-const ENGINE_PACKAGES = ['simple-statistics', 'valibot'];
+const ENGINE_PACKAGES = ['simple-statistics'];
 /** What the page may read of the engine. */
 const WEB_MAY_READ = [
   'engine/project',

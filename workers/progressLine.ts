@@ -28,7 +28,7 @@ export function progressLine(model: Model, stream: NodeJS.WriteStream | null): P
         chance = `  ${limit.name}: ${chanceText(known)}${band === '' ? '' : ` (${band})`}`;
       }
       const done = `${numberText(of)} of ${numberText(replicates * REALISATIONS_IN_REPLICATE)} realisations`;
-      terminal.write(`\r\u001b[2K${`${done}${chance}`.slice(0, Math.max(20, (terminal.columns ?? 80) - 1))}`);
+      terminal.write(`\r\u001b[2K${`${done}${chance}`.slice(0, Math.max(20, (terminal.columns || 80) - 1))}`);
     },
     clear() {
       terminal?.write('\r\u001b[2K');

@@ -1,8 +1,10 @@
+import { createHash } from 'node:crypto';
 import type { Realisations } from '../engine/settlement/realisations.ts';
 
 /**
  * What joining needs: the project, and its replicates with every byte. One file: a line of JSON that says what
- * follows, then the numbers of all arrays as 64-bit floats, least significant byte first.
+ * follows, then the numbers of all arrays as 64-bit floats, least significant byte first, then the SHA-256 of all
+ * before it, so that a file damaged on its way is noticed.
  */
 export interface ReplicateFile {
   readonly format: 'slow-ground-replicates';
@@ -15,6 +17,8 @@ export interface ReplicateFile {
   readonly project: string;
   readonly replicates: readonly Realisations[];
 }
+
+const HASH_BYTES = 32;
 
 const ARRAYS = [
   'historyTimes',
@@ -36,7 +40,15 @@ interface StoredReplicate {
 
 /** The pieces of the file, one after the other, so that a large one is never held twice. */
 export function* writtenReplicates(file: ReplicateFile): Generator<Uint8Array> {
-  const { replicates, ...head } = file;
+  const hash = createHash('sha256');
+  for (const piece of unsignedPieces(file)) {
+    hash.update(piece);
+    yield piece;
+  }
+  yield hash.digest();
+}
+
+function* unsignedPieces({ replicates, ...head }: ReplicateFile): Generator<Uint8Array> {
   const stored = replicates.map((each): StoredReplicate => ({
     replicate: each.replicate,
     count: each.count,
@@ -61,7 +73,11 @@ function littleEndian(array: Float64Array): Uint8Array {
 }
 
 /** Reads such a file; null where it is damaged, cut short, or something else. */
-export function readReplicates(bytes: Uint8Array): ReplicateFile | null {
+export function readReplicates(file: Uint8Array): ReplicateFile | null {
+  if (file.length < HASH_BYTES) return null;
+  const bytes = file.subarray(0, file.length - HASH_BYTES);
+  const hash = createHash('sha256').update(bytes).digest();
+  if (!hash.equals(file.subarray(bytes.length))) return null;
   const lineEnd = bytes.indexOf(0x0a);
   if (lineEnd < 0) return null;
   try {

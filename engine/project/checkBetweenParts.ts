@@ -33,7 +33,7 @@ export function checkBetweenParts(reading: Reading, parts: ReadParts): void {
 function refuseStandingOnPlaced(reading: Reading, { lifts }: ReadParts): void {
   lifts?.forEach((lift, i) => {
     if (!lift.standing || lifts.slice(0, i).every((below) => below.standing)) return;
-    const place = { pointer: `/fill/lifts/${i}/standing`, path: `lift "${lift.name}", standing` };
+    const place = { pointer: `/fill/lifts/${i}/standing`, path: `fill, lift "${lift.name}", standing` };
     reading.faults.add(
       place,
       'a standing lift after one that is placed',

@@ -28,7 +28,7 @@ export function checkDates(
   lifts.forEach(({ name, placing, removal }, i) => {
     const place = (key: string, words: string) => ({
       pointer: `/fill/lifts/${i}/${key}`,
-      path: `lift "${name}", ${words}`,
+      path: `fill, lift "${name}", ${words}`,
     });
     if (placing !== null) {
       inOrder(place('placing/end_year', 'placing'), 'an end', placing.start, placing.end, 'its start');

@@ -15,6 +15,11 @@ export class FaultList {
       this.listed.push({ pointer: place.pointer, path: place.path, found, right });
   }
 
+  /** Further faults are only counted: their words need not be found. */
+  get isFull(): boolean {
+    return this.count >= MOST_LISTED;
+  }
+
   get isEmpty(): boolean {
     return this.count === 0;
   }

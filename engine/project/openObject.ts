@@ -35,6 +35,10 @@ export function openObject(
   const missing = keys.required.filter((key) => !entries.has(key));
   for (const key of entries.keys()) {
     if (known.includes(key)) continue;
+    if (reading.faults.isFull) {
+      reading.faults.add(place, 'a key that is not known here', 'none');
+      continue;
+    }
     const nearest = nearestWord(key, [...missing, ...known]);
     const right = nearest === null ? `one of the keys ${inWords(known)}` : `the key ${quoted(nearest)}`;
     reading.faults.add(placeWithin(place, key, `key ${quoted(key)}`), 'a key that is not known here', right);

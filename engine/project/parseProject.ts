@@ -1,4 +1,5 @@
 import { describeFound, quoted } from './describeFound.ts';
+import { nestsDeeperThan } from './nesting.ts';
 import { WHOLE_PROJECT } from './place.ts';
 import type { Reading } from './reading.ts';
 import { repeatedKeys } from './repeatedKeys.ts';
@@ -7,6 +8,7 @@ import { CURRENT_VERSION, upgradeProject } from './upgradeProject.ts';
 /** What the file says it is. */
 export const FORMAT = 'slow-ground-project';
 const MOST_BYTES = 20_000_000;
+const DEEPEST = 100;
 
 /**
  * Text to a project of the current version; undefined, with a fault, where it is too large, not JSON, no
@@ -15,6 +17,11 @@ const MOST_BYTES = 20_000_000;
 export function parseProject(reading: Reading, text: string): Readonly<Record<string, unknown>> | undefined {
   if (text.length > MOST_BYTES || bytesOf(text) > MOST_BYTES) {
     reading.faults.add({ pointer: '', path: 'the file' }, 'more than 20 MB', 'a file of at most 20 MB');
+    return undefined;
+  }
+  if (nestsDeeperThan(DEEPEST, text)) {
+    const right = 'the keys of a project, which nest to fewer than ten';
+    reading.faults.add({ pointer: '', path: 'the file' }, `brackets nested more than ${DEEPEST} deep`, right);
     return undefined;
   }
   let value: unknown;

@@ -14,13 +14,13 @@ import {
   MODEL_FACTOR_KEYS,
   PERCENTILE,
   REALISATIONS,
-  REALISATIONS_STEP,
   RESULT_KEYS,
   SAMPLING_KEYS,
   SECONDARY_KEYS,
   SEED,
   WATER_KEYS,
 } from './readSettings.ts';
+import { REALISATIONS_IN_REPLICATE } from './replicateSize.ts';
 import { TIMES_KEYS } from './readTimes.ts';
 import { fillSchema, surfaceLoadSchema } from './schemaOfFill.ts';
 import { limitSchema } from './schemaOfLimits.ts';
@@ -126,7 +126,7 @@ export function projectSchema(): Schema {
         MOST.correlations,
       ),
       sampling: objectSchema(SAMPLING_KEYS, {
-        realisations: wholeNumberSchema(REALISATIONS, REALISATIONS_STEP),
+        realisations: wholeNumberSchema(REALISATIONS, REALISATIONS_IN_REPLICATE),
         seed: wholeNumberSchema(SEED),
         note: TEXT_SCHEMA,
       }),

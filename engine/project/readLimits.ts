@@ -78,18 +78,18 @@ export function readLimits(
       refuseStrangers(reading, object, result);
       for (const each of [of, key]) exactlyOneKey(reading, object, [each]);
       const names = of === 'point' ? points : pairs;
-      const place_ = readReference(reading, object, of, names, of);
+      const index = readReference(reading, object, of, names, of);
       const given = readNumber(reading, object, key, range);
-      const unnamed = `${words}${place_ === undefined ? '' : ` at ${names[place_]}`}${
+      const unnamed = `${words}${index === undefined ? '' : ` at ${names[index]}`}${
         object.entries.has('date_year') ? ` from ${String(object.entries.get('date_year'))}` : ''
       }`;
       const name = orElse(object, 'name', unnamed, () => readName(reading, object, 'name'));
-      named.push({ place, name: object.entries.has('name') ? name : undefined });
+      named.push({ place, name });
       return whole<Limit>({
         name,
         result,
-        point: of === 'point' ? place_ : -1,
-        pair: of === 'pair' ? place_ : -1,
+        point: of === 'point' ? index : -1,
+        pair: of === 'pair' ? index : -1,
         value:
           given === undefined ? undefined : key === 'limit_m_per_m' ? given : given / MILLIMETRES_IN_METRE,
         date: readDate(reading, object, times),

@@ -15,6 +15,7 @@ import {
   readText,
   readWholeNumber,
 } from './readValues.ts';
+import { REALISATIONS_IN_REPLICATE } from './replicateSize.ts';
 import { whole, wholeList, type Reading } from './reading.ts';
 
 export const WATER_KEYS = { required: ['depth_m'], optional: ['base_excess_head_m', 'note'] } as const;
@@ -31,13 +32,11 @@ export const RESULT_KEYS = {
   optional: ['percentiles', 'degree_of_consolidation', 'note'],
 } as const;
 
-export const REALISATIONS = fromTo(100, MOST.realisations);
+export const REALISATIONS = fromTo(REALISATIONS_IN_REPLICATE, MOST.realisations);
 export const SEED = fromTo(0, 9_007_199_254_740_991);
 export const PERCENTILE = fromTo(0.1, 99.9);
 export const DEGREE = fromTo(0.01, 0.999);
 export const FACTOR_MARGINALS = ['lognormal', 'fixed'] as const;
-/** Strata of a replicate. */
-export const REALISATIONS_STEP = 100;
 const DEFAULT_PERCENTILES: readonly number[] = [5, 25, 50, 75, 95];
 
 /** Opens the object under a key of the project, and reads its note. */
@@ -128,7 +127,7 @@ export function readSampling(reading: Reading, project: OpenedObject): Model['sa
   return (
     object &&
     whole<Model['sampling']>({
-      realisations: readWholeNumber(reading, object, 'realisations', REALISATIONS, REALISATIONS_STEP),
+      realisations: readWholeNumber(reading, object, 'realisations', REALISATIONS, REALISATIONS_IN_REPLICATE),
       seed: readWholeNumber(reading, object, 'seed', SEED),
     })
   );

@@ -2,12 +2,13 @@ import { deviation, mean } from '../marginals/marginal.ts';
 import { quoted } from './describeFound.ts';
 import type { Remark } from './model.ts';
 import type { Place } from './place.ts';
+import { REALISATIONS_IN_REPLICATE } from './replicateSize.ts';
 import { remarksOnDates } from './remarksOnDates.ts';
 import { remarksOnDrains } from './remarksOnDrains.ts';
 import type { UnremarkedModel } from './unremarkedModel.ts';
 
 /** Realisations of the ten replicates that a band needs. */
-const REALISATIONS_FOR_BAND = 1_000;
+const REALISATIONS_FOR_BAND = 10 * REALISATIONS_IN_REPLICATE;
 
 /**
  * What is allowed in a project but should be known.

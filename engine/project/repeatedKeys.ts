@@ -1,3 +1,5 @@
+import { endOfString } from './nesting.ts';
+
 /** A key that stands twice in one object, which a JSON parser passes over in silence. */
 export interface RepeatedKey {
   readonly pointer: string;
@@ -11,8 +13,6 @@ interface Level {
   position: number;
 }
 
-const STRINGS_AND_MARKS = /"(?:[^"\\]|\\.)*"|[{}[\],:]/gs;
-
 /**
  * Keys that an object of a JSON text has twice, at most 20 of them.
  *
@@ -22,13 +22,13 @@ export function repeatedKeys(text: string): RepeatedKey[] {
   const repeated: RepeatedKey[] = [];
   const levels: Level[] = [];
   let expectsKey = false;
-  for (const [token] of text.matchAll(STRINGS_AND_MARKS)) {
+  for (let i = 0; i < text.length; i += 1) {
     const level = levels[levels.length - 1];
-    switch (token) {
+    switch (text[i]) {
       case '{':
       case '[':
-        levels.push({ keys: token === '{' ? new Set() : null, step: '', position: 0 });
-        expectsKey = token === '{';
+        expectsKey = text[i] === '{';
+        levels.push({ keys: expectsKey ? new Set() : null, step: '', position: 0 });
         break;
       case '}':
       case ']':
@@ -39,22 +39,27 @@ export function repeatedKeys(text: string): RepeatedKey[] {
         level.position += 1;
         expectsKey = level.keys !== null;
         break;
-      case ':':
-        break;
-      default:
+      case '"': {
+        const start = i;
+        i = endOfString(text, start);
         if (!expectsKey) break;
         expectsKey = false;
-        level.step = JSON.parse(token) as string;
+        level.step = keyOf(text.slice(start, i + 1));
         if (level.keys!.has(level.step) && repeated.length < MOST_NAMED) {
           repeated.push({ pointer: pointerOf(levels), key: level.step });
         }
         level.keys!.add(level.step);
+      }
     }
   }
   return repeated;
 }
 
 const MOST_NAMED = 20;
+
+function keyOf(quotedKey: string): string {
+  return quotedKey.includes('\\') ? (JSON.parse(quotedKey) as string) : quotedKey.slice(1, -1);
+}
 
 function pointerOf(levels: readonly Level[]): string {
   return levels

@@ -13,6 +13,9 @@ import type { Column, SecondaryLaw } from './column.ts';
 import { columnLoads, earliestDate, standingStress, topUpUnitWeight, type ValueOf } from './columnLoads.ts';
 import { radialDrainage } from './radialDrainage.ts';
 
+/** Above this depth the initial stress of any ground is next to nothing, m; there its floor is not counted. */
+const AT_SURFACE = 0.25;
+
 /** How finely a column is cut. */
 export interface Resolution {
   /** Cells aimed at over the layers that drain poorly. */
@@ -99,7 +102,9 @@ export function assembleColumn(
       recompressionSetToCompression: soils.some(
         (soil) => soil.behaviour === 'compressible' && soil.recompressionSetToCompression,
       ),
-      initialStressAtFloor: found.some((stress) => stress < LOWEST_INITIAL_STRESS),
+      initialStressAtFloor: found.some(
+        (stress, i) => stress < LOWEST_INITIAL_STRESS && cells.middle[i] > AT_SURFACE,
+      ),
       vacuumDrainsCrossSeam:
         vacuum !== null && drains !== null && crossesSeam(drains, layers, isFree, drainage.joinedToTop),
       datesPutInOrder,

@@ -39,7 +39,7 @@ export interface ClampCounts {
   readonly voidRatioBelowTenth: number;
   /** A strain passed 30 %. */
   readonly strainAboveThirtyPercent: number;
-  /** σ'v0 held at 1 kPa. */
+  /** σ'v0 held at 1 kPa deeper than 0.25 m (above that it is so in any ground). */
   readonly initialStressAtFloor: number;
   /** Drains under vacuum crossed a free-draining layer. */
   readonly vacuumDrainsCrossSeam: number;

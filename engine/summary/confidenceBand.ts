@@ -1,3 +1,4 @@
+import { sampleStandardDeviation } from 'simple-statistics';
 import { inverseIncompleteBeta } from '../marginals/incompleteBeta.ts';
 import { studentTQuantile } from '../marginals/studentT.ts';
 import type { Estimate } from './summary.ts';
@@ -18,11 +19,8 @@ export const FEW_BEYOND = 50;
 export function halfWidth(values: ArrayLike<number>): number {
   const replicates = values.length;
   if (replicates < LEAST_REPLICATES) return NaN;
-  let mean = 0;
-  for (let i = 0; i < replicates; i += 1) mean += values[i] / replicates;
-  let squares = 0;
-  for (let i = 0; i < replicates; i += 1) squares += (values[i] - mean) * (values[i] - mean);
-  return tQuantile(replicates - 1) * Math.sqrt(squares / (replicates - 1) / replicates);
+  const deviation = sampleStandardDeviation(Array.from(values));
+  return (tQuantile(replicates - 1) * deviation) / Math.sqrt(replicates);
 }
 
 const quantiles = new Map<number, number>();

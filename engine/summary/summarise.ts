@@ -1,3 +1,4 @@
+import { mean as meanOf, sampleStandardDeviation } from 'simple-statistics';
 import type { Model } from '../project/model.ts';
 import type { ClampCounts, Realisations } from '../settlement/realisations.ts';
 import { bandOfShare, halfWidth } from './confidenceBand.ts';
@@ -78,15 +79,13 @@ function summariseQuantity(
   const mean = meanWithBand(own);
   const sortedOwn = own.map((column) => column.slice().sort());
   const sorted = values.slice().sort();
-  let squares = 0;
-  for (const value of values) squares += (value - mean.value) * (value - mean.value);
   const isOfPair = quantity.pair >= 0;
   const absolute = isOfPair ? values.map(Math.abs).sort() : sorted;
   const absoluteOwn = isOfPair ? own.map((column) => column.map(Math.abs).sort()) : sortedOwn;
   return {
     quantity,
     mean,
-    deviation: Math.sqrt(squares / Math.max(1, values.length - 1)),
+    deviation: sampleStandardDeviation(Array.from(values)),
     percentiles: model.results.percentiles.map((percent) => ({
       percent,
       estimate: percentileWithBand(sorted, sortedOwn, percent / 100),
@@ -128,18 +127,13 @@ function summariseLimit(
   };
 }
 
-/** Mean of all values with its band. */
+/** Mean of all values with its band; NaN where a value is not finite. */
 function meanWithBand(ofReplicates: readonly Float64Array[]): Estimate {
-  let sum = 0;
-  let count = 0;
-  const means = ofReplicates.map((column) => {
-    let own = 0;
-    for (const value of column) own += value;
-    sum += own;
-    count += column.length;
-    return own / column.length;
-  });
-  const value = Number.isFinite(sum) ? sum / count : NaN;
+  const means = ofReplicates.map((column) => meanOf(Array.from(column)));
+  const weights = ofReplicates.map((column) => column.length);
+  const count = weights.reduce((sum, weight) => sum + weight, 0);
+  const value = means.reduce((sum, own, i) => sum + own * (weights[i] / count), 0);
+  if (!Number.isFinite(value)) return { value: NaN, low: NaN, high: NaN };
   const half = halfWidth(means);
   return { value, low: value - half, high: value + half };
 }

@@ -68,7 +68,11 @@ async function checks() {
       '--fail-on-warnings',
     ]),
     await run('lint', bin('eslint'), ['.', '--max-warnings=0']),
-    await run('format', bin('prettier'), ['--check', '--log-level=warn', '.']),
+    await run('format', bin('prettier'), [
+      '--check',
+      '--log-level=warn',
+      '**/*.{ts,mts,mjs,js,svelte,css,html,md}',
+    ]),
   ];
   const passed = results.filter(({ ok }) => ok).length;
   return { passed, failed: results.length - passed };

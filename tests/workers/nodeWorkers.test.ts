@@ -1,7 +1,7 @@
-import { rmSync } from 'node:fs';
+import { existsSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import { centralStudy, runReplicate } from '../../engine/study.ts';
 import { summarise } from '../../engine/summary/summarise.ts';
 import { nodeWorkers } from '../../workers/nodeWorkers.ts';
@@ -11,27 +11,33 @@ import { WorkerPool } from '../../workers/workerPool.ts';
 import { smallProject } from '../browser/smallProject.ts';
 import { modelOf } from '../modelOf.ts';
 import { buildForNode } from './buildForNode.ts';
+import type { Death } from './dyingStudy.node.ts';
 
 const REPLICATES = [0, 1, 2];
 const model = modelOf(smallProject('invented small project', 300));
 let folder = '';
+/** What the whole study says by the engine in this process. */
+let expected = '';
 
 beforeAll(async () => {
+  const replicates = REPLICATES.map((replicate) => runReplicate(model, replicate));
+  expected = summaryFile(summarise(model, replicates, centralStudy(model)));
   folder = await buildForNode(['workers/study.node.ts', 'tests/workers/dyingStudy.node.ts']);
 });
 afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
-const entry = (name: string, query = '') => new URL(`${pathToFileURL(join(folder, name)).href}${query}`);
+afterEach(() => {
+  delete process.env.DEATH;
+});
 
-/** What a whole study says, by the engine in this process. */
-const expected = () =>
-  summaryFile(
-    summarise(
-      model,
-      REPLICATES.map((replicate) => runReplicate(model, replicate)),
-      centralStudy(model),
-    ),
-  );
+const entry = (name: string) => pathToFileURL(join(folder, name));
+
+/** The worker that dies; `once` names the mark that it leaves. */
+function dying(at: Death['at'], how: Death['how'], once = ''): URL {
+  process.env.DEATH = JSON.stringify({ at, how, mark: once && join(folder, once) } satisfies Death);
+  return entry('dyingStudy.node.mjs');
+}
+const hasDied = (once: string) => existsSync(join(folder, once));
 
 async function studyWith(file: URL, size: number, onProgress?: (progress: StudyProgress) => void) {
   const pool = new WorkerPool(nodeWorkers(file), size);
@@ -42,9 +48,8 @@ async function studyWith(file: URL, size: number, onProgress?: (progress: StudyP
 
 describe('a study on worker threads', () => {
   it('gives the bytes of the engine alone with 1, 2 and 7 workers', async () => {
-    const alone = expected();
     for (const size of [1, 2, 7]) {
-      expect((await studyWith(entry('study.node.mjs'), size)) === alone, `${size} workers`).toBe(true);
+      expect((await studyWith(entry('study.node.mjs'), size)) === expected, `${size} workers`).toBe(true);
     }
   });
 
@@ -58,34 +63,35 @@ describe('a study on worker threads', () => {
     expect(first?.summary?.provenance.realisations).toBeLessThan(300);
   });
 
-  it.each(['exit', 'throw'])(
+  it.each(['exit', 'throw'] as const)(
     'replaces a worker that dies by %s at a replicate, and does it again',
     async (how) => {
-      const mark = join(folder, `mark-${how}`);
-      const query = `?at=replicate&how=${how}&mark=${encodeURIComponent(mark)}`;
-      expect((await studyWith(entry('dyingStudy.node.mjs', query), 2)) === expected()).toBe(true);
+      expect((await studyWith(dying('replicate', how, `${how} once`), 2)) === expected).toBe(true);
+      expect(hasDied(`${how} once`)).toBe(true);
     },
   );
 
   it('replaces the worker that pools, and does again what died with it', async () => {
-    const query = `?at=keep&how=exit&mark=${encodeURIComponent(join(folder, 'mark-keep'))}`;
-    expect((await studyWith(entry('dyingStudy.node.mjs', query), 2)) === expected()).toBe(true);
+    expect((await studyWith(dying('keep', 'exit', 'keep once'), 2)) === expected).toBe(true);
+    expect(hasDied('keep once')).toBe(true);
   });
 
   it('ends in a fault when workers die again and again at one replicate', async () => {
-    expect(await studyWith(entry('dyingStudy.node.mjs', '?at=replicate&how=exit&always'), 2)).toEqual({
+    expect(await studyWith(dying('replicate', 'exit'), 2)).toEqual({
       kind: 'fault',
       message: 'A worker died 3 times at replicate 1: a worker ended with 3.',
     });
   });
 
   it('ends in a fault when the worker that pools dies again and again', async () => {
-    const end = await studyWith(entry('dyingStudy.node.mjs', '?at=keep&how=exit&always'), 2);
-    expect(end).toMatchObject({ kind: 'fault' });
+    expect(await studyWith(dying('keep', 'exit'), 2)).toEqual({
+      kind: 'fault',
+      message: 'A worker died 3 times at the same work: a worker ended with 3.',
+    });
   });
 
   it('ends in a fault with the words of the engine when it throws', async () => {
-    expect(await studyWith(entry('dyingStudy.node.mjs', '?at=central'), 2)).toEqual({
+    expect(await studyWith(dying('central', 'throw'), 2)).toEqual({
       kind: 'fault',
       message: 'centralStudy: thrown on purpose',
     });
@@ -133,7 +139,7 @@ describe('a study on worker threads', () => {
     const newer = pool.start({ model, replicates: REPLICATES });
     expect(await older.end).toEqual({ kind: 'replaced' });
     const end = await newer.end;
-    expect(end.kind === 'done' && summaryFile(end.summary) === expected()).toBe(true);
+    expect(end.kind === 'done' && summaryFile(end.summary) === expected).toBe(true);
     pool.dispose();
   });
 });

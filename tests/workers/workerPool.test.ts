@@ -72,10 +72,17 @@ const events = fc.array(
       arbitrary: fc.record({ does: fc.constant('start' as const), count: fc.integer({ min: 1, max: 6 }) }),
     },
     { weight: 1, arbitrary: fc.record({ does: fc.constant('cancel' as const), which: fc.nat(9) }) },
-    { weight: 2, arbitrary: fc.record({ does: fc.constant('kill' as const), which: fc.nat(9) }) },
+    {
+      weight: 2,
+      arbitrary: fc.record({
+        does: fc.constant('kill' as const),
+        which: fc.nat(9),
+        times: fc.constantFrom(1, 1, 1, 3),
+      }),
+    },
     { weight: 12, arbitrary: fc.record({ does: fc.constant('answer' as const), which: fc.nat(9) }) },
   ),
-  { maxLength: 40 },
+  { maxLength: 60, size: 'max' },
 );
 
 describe('a worker pool', () => {
@@ -101,8 +108,8 @@ describe('a worker pool', () => {
             runs.push(entry);
           } else if (event.does === 'cancel') runs[event.which % Math.max(1, runs.length)]?.run.cancel();
           else if (event.does === 'kill') {
-            deaths += 1;
-            await workshop.kill(event.which);
+            deaths += event.times;
+            for (let i = 0; i < event.times; i += 1) await workshop.kill(event.which);
           } else await workshop.answer(event.which);
         }
         while (await workshop.answer(0));
@@ -171,6 +178,19 @@ describe('a worker pool', () => {
     expect(await pool.start({ model: MODEL, replicates: [0] }).end).toEqual({
       kind: 'fault',
       message: 'no more threads',
+    });
+  });
+
+  it('gives a run up, in a fault, after three deaths at one replicate', async () => {
+    const workshop = new Workshop();
+    const pool = new WorkerPool(workshop.make, 1);
+    const { end } = pool.start({ model: MODEL, replicates: [0, 1] });
+    // the first worker pools, the newest one runs the replicate
+    for (let i = 0; i < 3; i += 1) await workshop.kill(1);
+    while (await workshop.answer(0));
+    expect(await end).toEqual({
+      kind: 'fault',
+      message: 'A worker died 3 times at replicate 0: killed on purpose.',
     });
   });
 

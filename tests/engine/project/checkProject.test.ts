@@ -128,7 +128,7 @@ describe('a text that is no project', () => {
       '{"soils":'.repeat(100_000) + '1' + '}'.repeat(100_000),
       `{"soils":${'['.repeat(100_000)}${']'.repeat(100_000)}}`,
     ]) {
-      expect(faultsOf(text).length).toBeGreaterThan(0);
+      expect(faultsOf(text).map(({ found }) => found)).toEqual(['brackets nested more than 100 deep']);
     }
   });
 
@@ -512,6 +512,24 @@ describe('what stands beside each other', () => {
   refuses('more than 200 points', '/points', /1 to 200/, (project) => {
     project.points = Array.from({ length: 201 }, (_, i) => ({ name: `point ${i}`, x_m: i }));
   });
+});
+
+describe('files that are made to be slow', () => {
+  const long = 19_900_000;
+  const texts: [string, () => string][] = [
+    ['one long text', () => `{"notes":"${'a'.repeat(long)}"}`],
+    ['a text of backslashes', () => `{"notes":"${'\\\\'.repeat(long / 2)}"}`],
+    ['a list of numbers', () => `{"soils":[${'1,'.repeat(long / 2)}1]}`],
+    ['nesting as deep as it goes', () => `{"soils":${'['.repeat(long / 2)}${']'.repeat(long / 2)}}`],
+    ['300,000 strange keys', () => `{${Array.from({ length: 300_000 }, (_, i) => `"key${i}":1`).join()}}`],
+  ];
+  for (const [title, text] of texts) {
+    it(`are refused all the same: ${title}`, { timeout: 30_000 }, () => {
+      const started = performance.now();
+      expect(faultsOf(text()).length).toBeGreaterThan(0);
+      expect(performance.now() - started).toBeLessThan(20_000);
+    });
+  }
 });
 
 describe('faults', () => {
