@@ -16,14 +16,16 @@ import { checkedModel, readProject } from './readProject.ts';
 import { WorkerPool } from './workerPool.ts';
 import { writeResults } from './writeResults.ts';
 
-// a reader that goes away, such as `head`, is no fault
 for (const stream of [process.stdout, process.stderr]) {
   stream.on('error', (error: NodeJS.ErrnoException) => {
-    if (error.code !== 'EPIPE') throw error;
+    // a reader that goes away, such as `head`, is no fault
+    if (error.code !== 'EPIPE') process.exitCode ??= NOT_FINISHED;
   });
 }
 const interruption = listenForInterruption();
-process.exitCode = await main(process.argv.slice(2));
+const code = await main(process.argv.slice(2));
+// what could not be printed has been noted by then
+if (code !== DONE) process.exitCode = code;
 
 async function main(words: readonly string[]): Promise<number> {
   const command = readCommandLine(words);

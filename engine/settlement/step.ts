@@ -8,7 +8,7 @@ import {
 } from '../ground/compressionLaw.ts';
 import type { Column } from './column.ts';
 import type { ColumnState } from './columnState.ts';
-import { flowCoefficients, type Flow } from './flow.ts';
+import { emptyFlow, flowCoefficients, type Flow } from './flow.ts';
 import type { TotalStress } from './stressState.ts';
 import { eliminate } from './eliminate.ts';
 
@@ -44,7 +44,7 @@ export function stepScratch(cells: number): StepScratch {
     diagonal: array(),
     rest: array(),
     perMetre: array(),
-    flow: { between: new Float64Array(cells + 1), radial: array() },
+    flow: emptyFlow(cells),
     memory: { largest: array(), strain: array(), logarithm: array() },
     flowKept: false,
     closed: false,
