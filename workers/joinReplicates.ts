@@ -43,7 +43,7 @@ function readFolder(folder: string): ReplicateFile | string {
   try {
     return readReplicates(readFileSync(path)) ?? `${path} is damaged, or no file of replicates`;
   } catch {
-    return `${path} cannot be read: was the run made with --replicates?`;
+    return `${path} cannot be read; runs to join are made with --replicates`;
   }
 }
 

@@ -1,7 +1,5 @@
 import {
-  accessSync,
   closeSync,
-  constants,
   existsSync,
   mkdirSync,
   mkdtempSync,
@@ -10,6 +8,7 @@ import {
   realpathSync,
   renameSync,
   rmSync,
+  rmdirSync,
   statSync,
   writeSync,
 } from 'node:fs';
@@ -41,7 +40,8 @@ export function outputFault(out: string): string | null {
     }
     const above = nearestFolderAbove(target);
     if (!statSync(above).isDirectory()) return `${above} is not a folder, so ${out} cannot be made in it`;
-    accessSync(above, constants.W_OK | constants.X_OK);
+    // what may be written shows only when it is tried
+    rmdirSync(mkdtempSync(join(above, `.${basename(target)}-`)));
     return null;
   } catch {
     return `${out} cannot be used as a folder of results`;

@@ -84,7 +84,7 @@ describe('the headless command', () => {
     expect(await refused(['a'])).toBe('replicate 1 of 3 is in none of the runs.\n');
     expect(await refused(['a', 'b', 'a'])).toBe('replicate 0 is in two of the runs.\n');
     expect(await refused(['seed', 'b'])).toBe('seed and b are of different seeds.\n');
-    expect(await refused(['whole', 'b'])).toContain('was the run made with --replicates?');
+    expect(await refused(['whole', 'b'])).toContain('runs to join are made with --replicates');
     mkdirSync(at('damaged'));
     const bytes = readFileSync(at('a', 'replicates.bin'));
     writeFileSync(at('damaged', 'replicates.bin'), bytes.subarray(0, bytes.length - 3));

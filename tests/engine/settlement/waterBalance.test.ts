@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { flowCoefficients } from '../../../engine/settlement/flow.ts';
+import { emptyFlow, flowCoefficients } from '../../../engine/settlement/flow.ts';
 import { marchedModel } from './marchedColumn.ts';
 import type { Plain, PlainCompressible } from './plainModel.ts';
 
@@ -24,7 +24,7 @@ function outflow(plain: Plain): number {
     (effective, i) => column.law.initialStress[i] + column.loads[0].stress[i] - effective,
   );
   const last = pore.length - 1;
-  const flow = { between: new Float64Array(last + 2), radial: new Float64Array(last + 1) };
+  const flow = emptyFlow(last + 1);
   flowCoefficients(column, track.final, column.drains !== null, flow);
   let out = flow.between[0] * pore[0] + flow.between[last + 1] * pore[last];
   pore.forEach((pressure, i) => (out += flow.radial[i] * pressure));
