@@ -18,7 +18,7 @@ export default defineConfig({
   base: './',
   publicDir: folder('public'),
   cacheDir: folder('node_modules/.vite'),
-  plugins: [svelte(), stylesOfTheDevServer],
+  plugins: [svelte({ configFile: false }), stylesOfTheDevServer],
   worker: { format: 'es' },
   build: { outDir: folder('dist'), emptyOutDir: true, sourcemap: false, target: 'es2022' },
   server: { port: 5173, fs: { allow: [folder('.')] } },

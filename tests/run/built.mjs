@@ -2,7 +2,17 @@
 // node built.mjs NAME entry.ts [more entries] -- arguments
 import { spawn } from 'node:child_process';
 import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readdirSync, readFileSync, statSync, writeFileSync } from 'node:fs';
+import {
+  existsSync,
+  mkdirSync,
+  mkdtempSync,
+  readdirSync,
+  readFileSync,
+  renameSync,
+  rmSync,
+  statSync,
+  writeFileSync,
+} from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { build } from 'vite';
@@ -11,7 +21,8 @@ const root = fileURLToPath(new URL('../../', import.meta.url));
 const split = process.argv.indexOf('--');
 const [name, ...entries] = process.argv.slice(2, split < 0 ? undefined : split);
 const words = split < 0 ? [] : process.argv.slice(split + 1);
-const folder = join(root, 'node_modules', '.cache', 'slow-ground', name);
+const cache = join(root, 'node_modules', '.cache', 'slow-ground');
+const DAY_MS = 86_400_000;
 
 /** Paths, sizes and times of all sources, as one hash. */
 function stampOf(folders) {
@@ -30,9 +41,22 @@ function stampOf(folders) {
   return hash.update(readFileSync(join(root, 'package-lock.json'))).digest('hex');
 }
 
-const stampFile = join(folder, 'stamp');
+/** Takes away builds that are older than a day; younger ones may be running. */
+function forgetOldBuilds() {
+  for (const each of readdirSync(cache)) {
+    const path = join(cache, each);
+    const made = statSync(path, { throwIfNoEntry: false })?.mtimeMs ?? Infinity;
+    if (Date.now() - made > DAY_MS) rmSync(path, { recursive: true, force: true });
+  }
+}
+
 const stamp = stampOf(['engine', 'workers', 'web/words', 'tests/bench']);
-if (!existsSync(stampFile) || readFileSync(stampFile, 'utf8') !== stamp) {
+const folder = join(cache, `${name}-${stamp.slice(0, 16)}`);
+if (!existsSync(folder)) {
+  mkdirSync(cache, { recursive: true });
+  forgetOldBuilds();
+  // built apart and put in its place at once, because the tasks of an array job may all start together
+  const draft = mkdtempSync(join(cache, 'draft-'));
   const input = Object.fromEntries(
     entries.map((entry) => [entry.replace(/^.*\//, '').replace(/\.ts$/, ''), join(root, entry)]),
   );
@@ -44,16 +68,21 @@ if (!existsSync(stampFile) || readFileSync(stampFile, 'utf8') !== stamp) {
     build: {
       ssr: true,
       target: 'node20',
-      outDir: folder,
+      outDir: draft,
       emptyOutDir: true,
       minify: false,
       rollupOptions: { input, output: { entryFileNames: '[name].mjs', chunkFileNames: '[name]-[hash].mjs' } },
     },
     ssr: { noExternal: true },
   });
-  mkdirSync(folder, { recursive: true });
-  writeFileSync(join(folder, 'package.json'), '{ "type": "module" }\n');
-  writeFileSync(stampFile, stamp);
+  writeFileSync(join(draft, 'package.json'), '{ "type": "module" }\n');
+  try {
+    renameSync(draft, folder);
+  } catch (error) {
+    rmSync(draft, { recursive: true, force: true });
+    // another was quicker
+    if (!existsSync(folder)) throw error;
+  }
 }
 const main = join(folder, `${entries[0].replace(/^.*\//, '').replace(/\.ts$/, '')}.mjs`);
 const child = spawn(process.execPath, [main, ...words], { stdio: 'inherit' });

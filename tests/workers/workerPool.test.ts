@@ -47,11 +47,17 @@ class Workshop {
   }
 
   /** Lets one of the workers that have something to say say it; false when none has. */
-  async answer(which: number): Promise<boolean> {
+  say(which: number): boolean {
     const able = this.alive.filter(({ answers }) => answers.length > 0);
     able[which % Math.max(1, able.length)]?.answers.shift()?.();
-    await turn();
     return able.length > 0;
+  }
+
+  /** The same, and waits until it has been heard. */
+  async answer(which: number): Promise<boolean> {
+    const hasSaid = this.say(which);
+    await turn();
+    return hasSaid;
   }
 
   async kill(which: number): Promise<void> {
@@ -71,7 +77,14 @@ const events = fc.array(
       weight: 1,
       arbitrary: fc.record({ does: fc.constant('start' as const), count: fc.integer({ min: 1, max: 6 }) }),
     },
-    { weight: 1, arbitrary: fc.record({ does: fc.constant('cancel' as const), which: fc.nat(9) }) },
+    {
+      weight: 1,
+      arbitrary: fc.record({
+        does: fc.constant('cancel' as const),
+        which: fc.nat(9),
+        asAnAnswerComes: fc.boolean(),
+      }),
+    },
     {
       weight: 2,
       arbitrary: fc.record({
@@ -92,22 +105,36 @@ describe('a worker pool', () => {
       fc.asyncProperty(events, fc.integer({ min: 1, max: 3 }), async (sequence, size) => {
         const workshop = new Workshop();
         const pool = new WorkerPool(workshop.make, size);
-        const runs: { run: StudyRun; asked: number[]; ends: StudyEnd[]; toldAfter: number }[] = [];
+        const runs: {
+          run: StudyRun;
+          asked: number[];
+          ends: StudyEnd[];
+          toldAfter: number;
+          isOver: boolean;
+        }[] = [];
         let deaths = 0;
         for (const event of sequence) {
           if (event.does === 'start') {
             const asked = Array.from({ length: event.count }, (_, i) => i);
             const ends: StudyEnd[] = [];
-            const entry = { run: null as unknown as StudyRun, asked, ends, toldAfter: 0 };
+            const entry = { run: null as unknown as StudyRun, asked, ends, toldAfter: 0, isOver: false };
             entry.run = pool.start({
               model: MODEL,
               replicates: asked,
-              onProgress: () => (entry.toldAfter += ends.length),
+              onProgress: () => (entry.toldAfter += Number(entry.isOver)),
+              onReplicate: () => (entry.toldAfter += Number(entry.isOver)),
             });
-            void entry.run.end.then((end) => ends.push(end));
+            void entry.run.end.then((end) => {
+              ends.push(end);
+              entry.isOver = true;
+            });
             runs.push(entry);
-          } else if (event.does === 'cancel') runs[event.which % Math.max(1, runs.length)]?.run.cancel();
-          else if (event.does === 'kill') {
+          } else if (event.does === 'cancel') {
+            if (event.asAnAnswerComes) workshop.say(event.which);
+            const cancelled = runs[event.which % Math.max(1, runs.length)];
+            cancelled?.run.cancel();
+            if (cancelled) cancelled.isOver = true;
+          } else if (event.does === 'kill') {
             deaths += event.times;
             for (let i = 0; i < event.times; i += 1) await workshop.kill(event.which);
           } else await workshop.answer(event.which);
@@ -192,6 +219,20 @@ describe('a worker pool', () => {
       kind: 'fault',
       message: 'A worker died 3 times at replicate 0: killed on purpose.',
     });
+  });
+
+  it('does not use a worker that died while it waited', async () => {
+    const workshop = new Workshop();
+    const pool = new WorkerPool(workshop.make, 3);
+    const study = async () => {
+      const { end } = pool.start({ model: MODEL, replicates: [0, 1, 2] });
+      while (await workshop.answer(0));
+      return (await end).kind;
+    };
+    expect(await study()).toBe('done');
+    expect(workshop.alive).toHaveLength(3);
+    while (workshop.alive.length > 0) await workshop.kill(0);
+    expect(await study()).toBe('done');
   });
 
   it('wants at least one worker', () => {
