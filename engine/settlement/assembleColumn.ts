@@ -61,15 +61,14 @@ export function assembleColumn(
   const standing = standingStress(loads, before.length);
   const laws = cellLaws(cells, soils, before, standing, value(model.modelFactors.rate));
   const drainage = drainageOfParts(isFree, topDrained);
-  const perCell = <T>(ofPart: readonly T[]) => Array.from(cells.part, (part) => ofPart[part]);
   const radial =
     drains === null
       ? null
       : radialDrainage(drains, value, layers, isFree, cells, { topDrained, baseDrained });
-  const hasDrains = drainage.meetsTop.map((_, stratum) =>
-    cells.part.some(
-      (part, i) => drainage.stratum[part] === stratum && radial !== null && radial.reached[i] > 0,
-    ),
+  const hasDrains = drainage.meetsTop.map(
+    (_, stratum) =>
+      radial !== null &&
+      cells.part.some((part, i) => drainage.stratum[part] === stratum && radial.reached[i] > 0),
   );
   const reachedStrata = drainage.meetsTop.map((meets, stratum) => meets || hasDrains[stratum]);
   return {
@@ -77,10 +76,11 @@ export function assembleColumn(
     law: laws.compression,
     permeability: laws.permeability,
     initialVolume: laws.initialVolume,
-    free: Uint8Array.from(perCell(isFree), Number),
-    joinedToTop: Uint8Array.from(perCell(drainage.joinedToTop), Number),
-    reachedByVacuum: Uint8Array.from(cells.part, (part) =>
-      Number(isFree[part] ? drainage.joinedToTop[part] : reachedStrata[drainage.stratum[part]]),
+    free: flagPerCell(cells, isFree),
+    joinedToTop: flagPerCell(cells, drainage.joinedToTop),
+    reachedByVacuum: flagPerCell(
+      cells,
+      isFree.map((free, part) => (free ? drainage.joinedToTop[part] : reachedStrata[drainage.stratum[part]])),
     ),
     topDrained,
     baseDrained,
@@ -111,6 +111,20 @@ export function assembleColumn(
       smearReachesInfluence: radial !== null && radial.smearReachesInfluence,
     },
   };
+}
+
+/** A flag of each part, for each of its cells. */
+function flagPerCell({ part }: Cells, ofPart: readonly boolean[]): Uint8Array {
+  const flags = new Uint8Array(part.length);
+  for (let i = 0; i < part.length; i += 1) flags[i] = ofPart[part[i]] ? 1 : 0;
+  return flags;
+}
+
+/** A number of each part, for each of its cells. */
+function numberPerCell({ part }: Cells, ofPart: readonly number[]): Float64Array {
+  const numbers = new Float64Array(part.length);
+  for (let i = 0; i < part.length; i += 1) numbers[i] = ofPart[part[i]];
+  return numbers;
 }
 
 /** The drains at x, or null. */
@@ -156,10 +170,9 @@ function secondaryLaw(
 ): SecondaryLaw | null {
   const anyRate = soils.some((soil) => soil.behaviour === 'compressible' && soil.secondaryIndex > 0);
   if (!model.secondary.included || !anyRate) return null;
-  const perCell = (ofSoil: (soil: DrawnSoil) => number) =>
-    Float64Array.from(cells.part, (part) => ofSoil(soils[part]));
+  const perCell = (ofSoil: (soil: DrawnSoil) => number) => numberPerCell(cells, soils.map(ofSoil));
   return {
-    stratum: Int32Array.from(cells.part, (part) => stratum[part]),
+    stratum: cells.part.map((part) => stratum[part]),
     strata: reachedByVacuum.length,
     rate: perCell((soil) =>
       soil.behaviour === 'compressible' ? soil.secondaryIndex / ((1 + soil.initialVoidRatio) * ln(10)) : 0,

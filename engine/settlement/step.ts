@@ -52,8 +52,8 @@ export function stepScratch(cells: number): StepScratch {
 }
 
 /** A step has closed when σ' changes by less than this share of itself and this share of the load. */
-const CLOSED_OF_STRESS = 1e-2;
-const CLOSED_OF_LOAD = 5e-3;
+const CLOSED_OF_STRESS = 3e-2;
+const CLOSED_OF_LOAD = 2e-2;
 /** Smallest load by which the iteration is judged, kPa. */
 const LEAST_LOAD = 0.2;
 /** Permeability follows the iterate while σ' changes by more than this share of itself. */
