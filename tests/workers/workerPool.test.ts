@@ -221,7 +221,7 @@ describe('a worker pool', () => {
     });
   });
 
-  it('does not use a worker that died while it waited', async () => {
+  it('finishes the next run though all its waiting workers have died', async () => {
     const workshop = new Workshop();
     const pool = new WorkerPool(workshop.make, 3);
     const study = async () => {
