@@ -24,8 +24,6 @@ const WEB_MAY_READ = [
   'engine/ground',
   'engine/load',
   'engine/drainage',
-  // the quantiles and densities of the marginals that a model holds
-  'engine/marginals',
 ];
 const LONGEST_FILE = 250;
 

@@ -91,6 +91,8 @@ export function firstOrderShare(order: Int32Array, values: Float64Array): number
   if (bins < 2) return NaN;
   let mean = 0;
   for (let i = 0; i < count; i += 1) mean += values[i] / count;
+  // a result that varies by no more than rounding does not vary
+  const rounding = 1e-24 * mean * mean * count;
   let total = 0;
   let between = 0;
   for (let bin = 0; bin < bins; bin += 1) {
@@ -104,5 +106,5 @@ export function firstOrderShare(order: Int32Array, values: Float64Array): number
     }
     between += (sum * sum) / (to - from);
   }
-  return total > 0 ? 1 - (((count - 1) / (count - bins)) * (total - between)) / total : NaN;
+  return total > rounding ? 1 - (((count - 1) / (count - bins)) * (total - between)) / total : NaN;
 }

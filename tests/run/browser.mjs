@@ -18,10 +18,11 @@ const INSTALLED = [
   'C:\\Program Files (x86)\\Microsoft\\Edge\\Application\\msedge.exe',
 ];
 
-/** Path of a browser, or null. */
+/** Path of a browser, or null. One that is named but not there is an error, not a reason to take another. */
 export function findBrowser() {
   const named = process.env.SLOW_GROUND_BROWSER;
-  const candidates = [...(named ? [named] : []), ...INSTALLED, chromium.executablePath()];
+  if (named) return existsSync(named) ? named : null;
+  const candidates = [...INSTALLED, chromium.executablePath()];
   return candidates.find((path) => path && existsSync(path)) ?? null;
 }
 
@@ -29,6 +30,11 @@ export function findBrowser() {
 export function requireBrowser() {
   const found = findBrowser();
   if (found) return found;
+  const named = process.env.SLOW_GROUND_BROWSER;
+  if (named) {
+    console.error(`SLOW_GROUND_BROWSER names ${named}, which is not there.`);
+    process.exit(1);
+  }
   const isRoot = typeof process.getuid === 'function' && process.getuid() === 0;
   if (isRoot && existsSync('/usr/bin/apt-get')) {
     console.error('Installing Chromium for the browser tests (once) …');
@@ -36,8 +42,12 @@ export function requireBrowser() {
       stdio: ['ignore', 'ignore', 'inherit'],
       env: { ...process.env, DEBIAN_FRONTEND: 'noninteractive' },
     };
-    execFileSync('apt-get', ['update', '-qq'], options);
-    execFileSync('apt-get', ['install', '-y', '-qq', '--no-install-recommends', 'chromium'], options);
+    try {
+      execFileSync('apt-get', ['update', '-qq'], options);
+      execFileSync('apt-get', ['install', '-y', '-qq', '--no-install-recommends', 'chromium'], options);
+    } catch {
+      // apt-get has said why; what is to be done follows
+    }
     const now = findBrowser();
     if (now) return now;
   }

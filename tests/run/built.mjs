@@ -23,6 +23,7 @@ const [name, ...entries] = process.argv.slice(2, split < 0 ? undefined : split);
 const words = split < 0 ? [] : process.argv.slice(split + 1);
 const cache = join(root, 'node_modules', '.cache', 'slow-ground');
 const DAY_MS = 86_400_000;
+const shell = process.ppid;
 
 /** Paths, sizes and times of all sources, as one hash. */
 function stampOf(folders) {
@@ -91,5 +92,11 @@ for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
   process.on(signal, () => {
     if (signal !== 'SIGINT' || !process.stdin.isTTY) child.kill(signal);
   });
+}
+// npm passes a signal to its shell and not beyond: where the shell is gone, the command ends too
+if (process.env.npm_lifecycle_event) {
+  setInterval(() => {
+    if (process.ppid !== shell) child.kill('SIGTERM');
+  }, 100).unref();
 }
 child.on('close', (code, signal) => process.exit(code ?? (signal === 'SIGINT' ? 130 : 1)));

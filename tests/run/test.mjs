@@ -19,7 +19,7 @@ function run(title, command, words, more = {}) {
       cwd: root,
       stdio: ['ignore', 'pipe', 'pipe'],
       shell: process.platform === 'win32',
-      env: { ...process.env, FORCE_COLOR: '0', ...more },
+      env: { ...process.env, NO_COLOR: '1', ...more },
     });
     let printed = '';
     child.stdout.on('data', (data) => (printed += data));
@@ -41,20 +41,24 @@ async function runVitest(title, project, more = {}) {
     'run',
     '--project',
     project,
+    // a forgotten `it.only` fails, it does not hide the rest
+    '--allowOnly=false',
     '--reporter=default',
     '--reporter=json',
     `--outputFile.json=${report}`,
   ];
   const ended = await run(title, bin('vitest'), words, more);
   try {
-    const { numPassedTests, numFailedTests, numTotalTestSuites, numFailedTestSuites } = JSON.parse(
-      readFileSync(report, 'utf8'),
-    );
-    // a file that cannot be loaded has no test that could fail
-    const broken = !ended.ok && numFailedTests === 0 ? Math.max(1, numFailedTestSuites) : 0;
-    return { passed: numPassedTests, failed: numFailedTests + broken, suites: numTotalTestSuites };
+    const { numPassedTests, numFailedTests, testResults } = JSON.parse(readFileSync(report, 'utf8'));
+    // a file that cannot be loaded, or whose hook fails, has no test that failed: it counts as one itself
+    const broken = testResults.filter(
+      ({ status, assertionResults }) =>
+        status === 'failed' && !assertionResults.some((test) => test.status === 'failed'),
+    ).length;
+    const failed = numFailedTests + broken;
+    return { passed: numPassedTests, failed: !ended.ok && failed === 0 ? 1 : failed };
   } catch {
-    return { passed: 0, failed: 1, suites: 0 };
+    return { passed: 0, failed: 1 };
   }
 }
 
