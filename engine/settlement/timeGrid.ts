@@ -25,10 +25,14 @@ const LEAST_POWER = 2;
 /** After a load or a vacuum that comes or goes at once. */
 const POWER_AFTER_SUDDEN = 3;
 const MOST_POWER = 4;
+/** Most steps of an interval over those of an ordinary one. */
+const MOST_FACTOR = 2;
 
 /** An interval of more consolidation times than this is cut in two after the next number of them. */
 const LONGEST_WHOLE = 6;
 const FIRST_PART = 4;
+/** Share of the usual steps that the rest of such an interval needs. */
+const SHARE_OF_STEPS_IN_REST = 0.7;
 /**
  * Intervals between all dates at which something about the column changes, from its time zero to the
  * horizon: the time grid starts afresh after each.
@@ -53,21 +57,26 @@ export function intervalsOf(column: Column, steps: number, consolidationTime: nu
   const sudden = suddenChanges(column);
   const intervals: Interval[] = [];
   let start = timeZero;
-  const add = (end: number, time: number) => {
+  const add = (end: number, time: number, part = 1) => {
     const previous = intervals.length === 0 ? Infinity : start - intervals[intervals.length - 1].start;
     const ratio = (end - start) / Math.min(time, PREVIOUS_LENGTHS * previous);
     const isSudden = sudden.some((date) => Math.abs(date - start) <= SAME_DATE);
     const least = isSudden ? POWER_AFTER_SUDDEN : LEAST_POWER;
     const power = ratio > 1 ? Math.min(MOST_POWER, least + 0.3 * ln(ratio)) : least;
-    const few = ratio < SHORT ? SHARE_OF_STEPS_IN_SHORT : 1;
-    intervals.push({ start, end, steps: Math.max(2, Math.round(steps * few * (power - 1))), power });
+    const few = ratio < SHORT ? SHARE_OF_STEPS_IN_SHORT : part;
+    intervals.push({
+      start,
+      end,
+      steps: Math.max(2, Math.round(steps * few * Math.min(MOST_FACTOR, power - 1))),
+      power,
+    });
     start = end;
   };
   for (const end of dates) {
     if (end - start <= SAME_DATE) continue;
     if (end - start > LONGEST_WHOLE * consolidationTime) {
       add(start + FIRST_PART * consolidationTime, consolidationTime);
-      add(end, FIRST_PART * consolidationTime);
+      add(end, FIRST_PART * consolidationTime, SHARE_OF_STEPS_IN_REST);
     } else add(end, consolidationTime);
   }
   return intervals;
