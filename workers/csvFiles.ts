@@ -24,7 +24,7 @@ export function exceedanceCsv(summary: Summary): string {
   ];
   for (const { quantity, exceedance } of summary.quantities) {
     exceedance.values.forEach((value, i) => {
-      const isResolved = value <= exceedance.unresolvedAbove ? 'yes' : 'no';
+      const isResolved = value < exceedance.unresolvedAbove ? 'yes' : 'no';
       rows.push([
         quantity.id,
         quantity.unit,

@@ -19,7 +19,7 @@ export const FEW_BEYOND = 50;
 export function halfWidth(values: ArrayLike<number>): number {
   const replicates = values.length;
   if (replicates < LEAST_REPLICATES) return NaN;
-  const deviation = sampleStandardDeviation(Array.from(values));
+  const deviation = sampleStandardDeviation(Array.isArray(values) ? values : Array.from(values));
   return (tQuantile(replicates - 1) * deviation) / Math.sqrt(replicates);
 }
 
@@ -32,16 +32,30 @@ function tQuantile(degreesOfFreedom: number): number {
   return quantile;
 }
 
+/** The tails of all curves of a study share the same few intervals. */
+const intervals = new Map<string, readonly [low: number, high: number]>();
+const MOST_KEPT = 10_000;
+
 /**
  * Exact binomial interval of a share at 90 %: the beta quantiles of Clopper & Pearson (1934).
  *
- * @param above realisations that pass
- * @param total all realisations
+ * @param above realisations that pass, from 0 to `total`
+ * @param total all realisations, 1 or more
+ * @throws where `above` or `total` is outside its range
  */
 export function binomialInterval(above: number, total: number): readonly [low: number, high: number] {
+  const key = `${above} ${total}`;
+  const known = intervals.get(key);
+  if (known !== undefined) return known;
+  if (!(total >= 1)) throw new RangeError(`binomialInterval: total must be 1 or more, got ${total}`);
+  if (!(above >= 0 && above <= total)) {
+    throw new RangeError(`binomialInterval: above must be from 0 to ${total}, got ${above}`);
+  }
   const tail = 0.5 * (1 - CONFIDENCE);
   const low = above === 0 ? 0 : inverseIncompleteBeta(tail, above, total - above + 1);
   const high = above === total ? 1 : inverseIncompleteBeta(1 - tail, above + 1, total - above);
+  if (intervals.size >= MOST_KEPT) intervals.clear();
+  intervals.set(key, [low, high]);
   return [low, high];
 }
 
@@ -58,11 +72,11 @@ export function bandOfShare(
 ): Estimate {
   let above = 0;
   let total = 0;
-  const shares = new Float64Array(aboveOfReplicates.length);
-  for (let i = 0; i < shares.length; i += 1) {
+  const shares: number[] = [];
+  for (let i = 0; i < aboveOfReplicates.length; i += 1) {
     above += aboveOfReplicates[i];
     total += countOfReplicates[i];
-    shares[i] = aboveOfReplicates[i] / countOfReplicates[i];
+    shares.push(aboveOfReplicates[i] / countOfReplicates[i]);
   }
   const value = above / total;
   const half = halfWidth(shares);

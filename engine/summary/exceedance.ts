@@ -20,33 +20,34 @@ export function exceedance(sorted: Float64Array, sortedReplicates: readonly Floa
   const low: number[] = [];
   const high: number[] = [];
   const counts = sortedReplicates.map((own) => own.length);
+  const atMost = counts.map(() => 0);
+  const above = counts.map(() => 0);
   for (const index of thinned(sorted.length)) {
     const value = sorted[index];
     if (values.length > 0 && value === values[values.length - 1]) continue;
-    const above = sortedReplicates.map((own) => own.length - countAtMost(own, value));
+    for (let r = 0; r < counts.length; r += 1) {
+      while (atMost[r] < counts[r] && sortedReplicates[r][atMost[r]] <= value) atMost[r] += 1;
+      above[r] = counts[r] - atMost[r];
+    }
     const band = bandOfShare(above, counts);
     values.push(value);
     shares.push(band.value);
     low.push(band.low);
     high.push(band.high);
   }
-  const unresolvedAbove = sorted.length > RESOLVED ? sorted[sorted.length - RESOLVED - 1] : sorted[0];
-  return { values, shares, low, high, unresolvedAbove };
+  return { values, shares, low, high, unresolvedAbove: sorted[Math.max(0, sorted.length - RESOLVED)] };
 }
 
-/** Values in a rising list that are at most `value`. */
-export function countAtMost(sorted: Float64Array, value: number): number {
-  let [from, to] = [0, sorted.length];
-  while (from < to) {
-    const middle = (from + to) >> 1;
-    if (sorted[middle] <= value) from = middle + 1;
-    else to = middle;
-  }
-  return from;
+let keptCount = 0;
+let keptPlaces: readonly number[] = [];
+/** The places of the last length asked for are kept: all curves of a study have one. */
+function thinned(count: number): readonly number[] {
+  if (count !== keptCount) [keptCount, keptPlaces] = [count, evenInOdds(count)];
+  return keptPlaces;
 }
 
 /** Places in a list of `count` values, first and last among them, even in ln(p/(1 − p)). */
-function thinned(count: number): number[] {
+function evenInOdds(count: number): number[] {
   if (count <= MOST_POINTS) return Array.from({ length: count }, (_, i) => i);
   const kept = [0];
   const oddsAt = (index: number) => ln((index + 0.5) / (count - index - 0.5));
@@ -54,9 +55,10 @@ function thinned(count: number): number[] {
   const stride = (oddsAt(count - 1) - first) / (MOST_POINTS - 1);
   let next = first + stride;
   for (let index = 1; index < count - 1; index += 1) {
-    if (oddsAt(index) < next) continue;
+    const odds = oddsAt(index);
+    if (odds < next) continue;
     kept.push(index);
-    while (oddsAt(index) >= next) next += stride;
+    while (odds >= next) next += stride;
   }
   kept.push(count - 1);
   return kept;

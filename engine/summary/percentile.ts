@@ -1,4 +1,5 @@
-import { binomialInterval, FEW_BEYOND, halfWidth } from './confidenceBand.ts';
+import { FEW_BEYOND, halfWidth } from './confidenceBand.ts';
+import { orderStatisticRanks } from './orderStatisticRanks.ts';
 import type { Estimate } from './summary.ts';
 
 /**
@@ -17,10 +18,13 @@ export function percentileSorted(sorted: Float64Array, share: number): number {
 
 /**
  * Percentile of all realisations with its 90 % band: from the replicates' own percentiles, and the wider of it
- * and the order statistics at the ends of the exact binomial interval where fewer than 50 lie beyond.
+ * and the order statistics that bound it where fewer than 50 realisations lie beyond. No band (NaN) where fewer
+ * than 10 replicates stand behind it, where no realisation bounds it, or where the percentile, or that of a
+ * replicate, is not finite.
  *
  * @param sorted all values, rising
  * @param sortedReplicates those of each replicate, rising
+ * @param share above 0 and below 1
  */
 export function percentileWithBand(
   sorted: Float64Array,
@@ -29,13 +33,12 @@ export function percentileWithBand(
 ): Estimate {
   const value = percentileSorted(sorted, share);
   const half = halfWidth(sortedReplicates.map((own) => percentileSorted(own, share)));
-  if (Number.isNaN(half) || !Number.isFinite(value)) return { value, low: NaN, high: NaN };
   let [low, high] = [value - half, value + half];
-  const below = Math.round(share * sorted.length);
-  if (Math.min(below, sorted.length - below) < FEW_BEYOND) {
-    const [shareLow, shareHigh] = binomialInterval(below, sorted.length);
-    low = Math.min(low, percentileSorted(sorted, shareLow));
-    high = Math.max(high, percentileSorted(sorted, shareHigh));
+  if (Number.isFinite(half) && Math.min(share, 1 - share) * sorted.length < FEW_BEYOND) {
+    const [lower, upper] = orderStatisticRanks(sorted.length, share);
+    low = lower < 1 ? NaN : Math.min(low, sorted[lower - 1]);
+    high = upper > sorted.length ? NaN : Math.max(high, sorted[upper - 1]);
   }
-  return { value, low, high };
+  const isBand = Number.isFinite(low) && Number.isFinite(high);
+  return isBand ? { value, low, high } : { value, low: NaN, high: NaN };
 }

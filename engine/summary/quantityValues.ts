@@ -1,5 +1,6 @@
 import type { Model } from '../project/model.ts';
 import type { Realisations } from '../settlement/realisations.ts';
+import { SAME_DATE } from '../settlement/timeGrid.ts';
 import type { Quantity } from './summary.ts';
 
 /**
@@ -67,15 +68,25 @@ function ofReplicate(model: Model, quantity: Quantity, replicate: Realisations):
 /** Settlement of a point at one of the history times, m. */
 function settlementAt(replicate: Realisations, point: number, date: number): Float64Array {
   const { historyTimes, settlement, count } = replicate;
-  const start = (point * historyTimes.length + nearestTime(historyTimes, date)) * count;
+  const start = (point * historyTimes.length + placeOfDate(historyTimes, date)) * count;
   return settlement.subarray(start, start + count);
 }
 
-/** Place of a date among the history times, which hold every date that a result is asked for. */
-function nearestTime(times: Float64Array, date: number): number {
+/**
+ * Place of a date among the history times, which hold every date that a result is asked for.
+ *
+ * @throws where they do not
+ */
+function placeOfDate(times: Float64Array, date: number): number {
   let nearest = 0;
   for (let t = 1; t < times.length; t += 1) {
     if (Math.abs(times[t] - date) < Math.abs(times[nearest] - date)) nearest = t;
+  }
+  // a date within SAME_DATE of two others may stand for both
+  if (!(Math.abs(times[nearest] - date) <= 2 * SAME_DATE)) {
+    throw new RangeError(
+      `quantityValues: the history must hold year ${date}, got ${times[nearest]} as nearest`,
+    );
   }
   return nearest;
 }

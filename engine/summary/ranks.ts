@@ -1,7 +1,12 @@
-/** Ranks from 1 of the values, ties at the mean of their ranks. */
-export function ranks(values: Float64Array): Float64Array {
-  const order = Int32Array.from(values, (_, i) => i);
-  order.sort((a, b) => values[a] - values[b] || (values[a] === values[b] ? a - b : 0));
+import { mean } from './mean.ts';
+import { risingOrder } from './risingOrder.ts';
+
+/**
+ * Ranks from 1 of the values, ties at the mean of their ranks.
+ *
+ * @param order places of the values from the smallest to the largest
+ */
+export function ranks(values: Float64Array, order: Int32Array = risingOrder(values)): Float64Array {
   const ranked = new Float64Array(values.length);
   let start = 0;
   while (start < order.length) {
@@ -17,13 +22,11 @@ export function ranks(values: Float64Array): Float64Array {
 /** Values less their mean, over their standard deviation; all NaN where they do not vary. */
 export function standardised(values: Float64Array): Float64Array {
   const count = values.length;
-  let mean = 0;
-  for (let i = 0; i < count; i += 1) mean += values[i];
-  mean /= count;
+  const middle = mean(values);
   let squares = 0;
-  for (let i = 0; i < count; i += 1) squares += (values[i] - mean) * (values[i] - mean);
+  for (let i = 0; i < count; i += 1) squares += (values[i] - middle) * (values[i] - middle);
   const scale = squares > 0 ? 1 / Math.sqrt(squares / count) : NaN;
-  return values.map((value) => (value - mean) * scale);
+  return values.map((value) => (value - middle) * scale);
 }
 
 /** Mean product of two standardised columns: their linear correlation. */

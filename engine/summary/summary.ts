@@ -65,7 +65,7 @@ export interface Quantity {
 
 export interface Estimate {
   readonly value: number;
-  /** Ends of the 90 % confidence band; NaN where fewer than 10 replicates stand behind it. */
+  /** Ends of the 90 % confidence band; NaN where fewer than 10 replicates stand behind it, or no realisation bounds a percentile. */
   readonly low: number;
   readonly high: number;
 }
@@ -80,6 +80,7 @@ export interface QuantitySummary {
   readonly exceedance: ExceedanceCurve;
   /** One for each of `Model.inputs` with any influence computed; empty when there are no inputs. */
   readonly drivers: readonly Driver[];
+  /** Mean of the replicates' medians so far, with the half-width of its band. */
   readonly convergence: readonly {
     readonly realisations: number;
     readonly median: number;
@@ -93,7 +94,7 @@ export interface ExceedanceCurve {
   readonly shares: readonly number[];
   readonly low: readonly number[];
   readonly high: readonly number[];
-  /** Value above which fewer than 10 realisations lie: from there on the tail is unresolved. */
+  /** Least value above which fewer than 10 realisations lie: from it on, itself included, the tail is unresolved. */
   readonly unresolvedAbove: number;
 }
 
@@ -104,9 +105,9 @@ export interface LimitSummary {
   /** Realisations above the limit, and all. */
   readonly above: number;
   readonly of: number;
-  /** Upper 95 % limit of the chance where none (or all) of the realisations pass: 'fewer than 1 in N/3'; NaN elsewhere. */
+  /** One-sided 95 % limit of the chance: the upper where none of the realisations pass, the lower where all do; NaN elsewhere. */
   readonly boundWhenNone: number;
-  /** Half-width of the band after each replicate from the tenth on. */
+  /** How far the band reaches to its longer side, after each replicate from the tenth on. */
   readonly convergence: readonly {
     readonly realisations: number;
     readonly chance: number;

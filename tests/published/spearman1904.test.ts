@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { drivers, rankedInput } from '../../engine/summary/drivers.ts';
+import { drivers, rankedInput, rankedInputs } from '../../engine/summary/drivers.ts';
 
 /**
  * Spearman, C. (1904) rank correlation, on ten points; figures computed from the definition with another library
@@ -15,7 +15,7 @@ describe('Spearman (1904), rank correlation of ten points', () => {
     ['x2 with y', x2, y, 0.8545454545454544],
     ['x1 with x2', x1, x2, 0.4545454545454545],
   ])('%s', (_, a, b, expected) => {
-    const [driver] = drivers([rankedInput(0, a)], b);
+    const [driver] = drivers(rankedInputs([rankedInput(0, a)]), b);
     expect(Math.abs(driver.rankCorrelation - expected)).toBeLessThan(1e-12);
   });
 });

@@ -23,6 +23,14 @@ describe('the exact binomial interval', () => {
     expect(1 - chanceOfAtLeast(k + 1, n, high)).toBeCloseTo(0.05, 9);
   });
 
+  it.each([
+    [0, 0, 'total must be 1 or more, got 0'],
+    [5, 4, 'above must be from 0 to 4, got 5'],
+    [NaN, 4, 'above must be from 0 to 4, got NaN'],
+  ])('is refused for %f of %f', (above, total, sentence) => {
+    expect(() => binomialInterval(above, total)).toThrow(sentence);
+  });
+
   it('starts at 0 for none and ends at 1 for all', () => {
     expect(binomialInterval(0, 40)[0]).toBe(0);
     expect(binomialInterval(40, 40)[1]).toBe(1);

@@ -3,7 +3,6 @@ import { quantile } from 'simple-statistics';
 import { describe, expect, it } from 'vitest';
 import { exceedance } from '../../../engine/summary/exceedance.ts';
 import { percentileSorted, percentileWithBand } from '../../../engine/summary/percentile.ts';
-import { convergence } from '../../../engine/summary/convergence.ts';
 
 const sorted = (values: readonly number[]) => Float64Array.from(values).sort();
 const replicates = fc.array(fc.array(fc.integer({ min: 0, max: 60 }), { minLength: 5, maxLength: 40 }), {
@@ -37,7 +36,28 @@ describe('the exceedance curve', () => {
     expect(values.every((value, i) => i === 0 || value > values[i - 1])).toBe(true);
     expect(shares.every((share, i) => i === 0 || share <= shares[i - 1])).toBe(true);
     expect([values[0], values[values.length - 1]]).toEqual([all[0], all[all.length - 1]]);
-    expect(all.filter((value) => value > unresolvedAbove)).toHaveLength(10);
+    // the curve falls at each of its values: just before this one ten lie above, from it on fewer
+    expect(all.filter((value) => value > unresolvedAbove)).toHaveLength(9);
+    expect(all.filter((value) => value >= unresolvedAbove)).toHaveLength(10);
+  });
+
+  it('is unresolved from the least value above which fewer than ten lie, however they are tied', () => {
+    fc.assert(
+      fc.property(replicates, (own) => {
+        const all = own.flat();
+        const { unresolvedAbove } = exceedance(sorted(all), own.map(sorted));
+        const fewAbove = all.filter((value) => all.filter((other) => other > value).length < 10);
+        expect(unresolvedAbove).toBe(Math.min(...fewAbove));
+      }),
+      { seed: 6, numRuns: 200 },
+    );
+  });
+
+  it('keeps the shares of the finite values where dates are not reached', () => {
+    const own = [sorted([1, 2, Infinity, Infinity])];
+    const curve = exceedance(own[0], own);
+    expect(curve.values).toEqual([1, 2, Infinity]);
+    expect(curve.shares).toEqual([0.75, 0.5, 0]);
   });
 });
 
@@ -57,19 +77,5 @@ describe('a percentile', () => {
     const values = sorted([1, 2, Infinity, Infinity]);
     expect(percentileSorted(values, 0.9)).toBe(Infinity);
     expect(percentileWithBand(values, [values], 0.9)).toEqual({ value: Infinity, low: NaN, high: NaN });
-  });
-});
-
-describe('the record of convergence', () => {
-  it('starts with the tenth replicate and ends with the last, in at most 61 entries', () => {
-    const shares = Array.from({ length: 500 }, (_, i) => (i % 7) / 10);
-    const record = convergence(
-      shares,
-      shares.map(() => 100),
-    );
-    expect(record[0].realisations).toBe(1000);
-    expect(record[record.length - 1].realisations).toBe(50_000);
-    expect(record.length).toBeLessThanOrEqual(61);
-    expect(record[record.length - 1].value).toBeCloseTo(shares.reduce((sum, share) => sum + share) / 500, 12);
   });
 });
